@@ -1,0 +1,37 @@
+using SpecLint.Spec.Units;
+
+namespace SpecLint.Review.Figures;
+
+/// <summary>One figure as declared: what it means and how it is computed.</summary>
+public sealed record FigureDefinition
+{
+    /// <summary>Dotted name; never the name of a spec key.</summary>
+    public required string Name { get; init; }
+
+    /// <summary>SI unit as written in JSON output, such as <c>V·s/rad</c>; <c>1</c> for a ratio.</summary>
+    public required string Unit { get; init; }
+
+    /// <summary>Unit shown to people, such as <c>mm</c>, <c>°C</c>, <c>A/mm²</c>; <c>%</c> or empty for ratios.</summary>
+    public required string DisplayUnit { get; init; }
+
+    /// <summary>Exponents of the SI base units.</summary>
+    public required Dimension Dimension { get; init; }
+
+    /// <summary>What it is, in one line.</summary>
+    public required string Meaning { get; init; }
+
+    /// <summary>The formula, with figure names and spec keys in braces; for a numerical step, the method in words.</summary>
+    public required string Formula { get; init; }
+
+    /// <summary>Where the formula comes from.</summary>
+    public required Basis Basis { get; init; }
+
+    /// <summary>Relative uncertainty that the method itself adds to that of its inputs, ≥ 0.</summary>
+    public double MethodUncertainty { get; init; }
+
+    /// <summary>True for estimates so coarse that a hold needs even the favourable end of the band to fail.</summary>
+    public bool IsCoarse { get; init; }
+
+    /// <summary>Computes the figure from other figures and spec values.</summary>
+    public required Func<Evaluation, Outcome> Compute { get; init; }
+}
