@@ -26,5 +26,5 @@ public sealed record Expression
     public required ImmutableArray<string> Keys { get; init; }
 
     /// <summary>The parsed tree.</summary>
-    internal required ExpressionNode Root { get; init; }
+    internal ExpressionNode Root { get; init; } = null!;
 }
