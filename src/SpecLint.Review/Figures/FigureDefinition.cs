@@ -8,14 +8,17 @@ public sealed record FigureDefinition
     /// <summary>Dotted name; never the name of a spec key.</summary>
     public required string Name { get; init; }
 
+    /// <summary>Its unit in SI, the unit shown to people, and its dimension.</summary>
+    public required FigureUnit UnitOfMeasure { get; init; }
+
     /// <summary>SI unit as written in JSON output, such as <c>V·s/rad</c>; <c>1</c> for a ratio.</summary>
-    public required string Unit { get; init; }
+    public string Unit => UnitOfMeasure.Si;
 
     /// <summary>Unit shown to people, such as <c>mm</c>, <c>°C</c>, <c>A/mm²</c>; <c>%</c> or empty for ratios.</summary>
-    public required string DisplayUnit { get; init; }
+    public string DisplayUnit => UnitOfMeasure.Display;
 
     /// <summary>Exponents of the SI base units.</summary>
-    public required Dimension Dimension { get; init; }
+    public Dimension Dimension => UnitOfMeasure.Dimension;
 
     /// <summary>What it is, in one line.</summary>
     public required string Meaning { get; init; }
@@ -31,6 +34,9 @@ public sealed record FigureDefinition
 
     /// <summary>True for estimates so coarse that a hold needs even the favourable end of the band to fail.</summary>
     public bool IsCoarse { get; init; }
+
+    /// <summary>The unit it has in a linear machine, where that differs (a speed in m/s instead of rad/s); else null.</summary>
+    public FigureUnit? LinearUnit { get; init; }
 
     /// <summary>Computes the figure from other figures and spec values.</summary>
     public required Func<Evaluation, Outcome> Compute { get; init; }

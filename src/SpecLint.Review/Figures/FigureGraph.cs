@@ -47,6 +47,11 @@ public sealed class FigureGraph
             }
 
             FigureDefinition definition = _catalogue[name];
+            if (definition.LinearUnit is { } unit && string.Equals(Spec.Find("machine.topology")?.Text, "linear", StringComparison.Ordinal))
+            {
+                definition = definition with { UnitOfMeasure = unit };
+            }
+
             Figure figure;
             var evaluation = new Evaluation(this, definition);
             if (_running.Add(name))
