@@ -1,0 +1,108 @@
+namespace SpecLint.Physics.Magnetics;
+
+/// <summary>Spectrum of the magnetisation of an alternating magnet array; depends on the outline and arrangement only.</summary>
+/// <remarks>
+/// <para>Axial: per unit remanence the magnetisation is the sum over odd n of cos(n p theta) times the integral of k M_n(k) J_np(k r) dk.
+/// Linear: the sum over odd n of cos(n pi x/tau) times (1/pi) times the integral of M_n(ky) cos(ky y) dky over positive ky.</para>
+/// <para>Coefficients are computed block by block when first asked for and kept; an instance may be shared by many fields but used by one
+/// thread at a time.</para>
+/// </remarks>
+/// <seealso>Hankel transform: Watson G.N., A Treatise on the Theory of Bessel Functions, 2nd ed., 1944, section 14.4.</seealso>
+public sealed class MagnetTransform
+{
+    private const int Nodes = WaveNumberGrid.NodesPerBlock;
+    private readonly List<List<double[]>> _blocks = [];
+
+    /// <summary>Prepares the spectrum of a magnet array.</summary>
+    /// <param name="geometry">The magnets; their <see cref="MagnetGeometry.DomainFault"/> must be null.</param>
+    /// <param name="grid">The wave-number grid, shared with the coil.</param>
+    /// <exception cref="ArgumentException">The geometry is outside the model's domain, or the grid belongs to another kind of machine.</exception>
+    public MagnetTransform(MagnetGeometry geometry, WaveNumberGrid grid)
+    {
+        if (geometry.DomainFault is { } fault)
+        {
+            throw new ArgumentException(fault, nameof(geometry));
+        }
+
+        if (geometry.PolePairs != grid.PolePairs)
+        {
+            throw new ArgumentException("the grid serves another number of pole pairs", nameof(grid));
+        }
+
+        Geometry = geometry;
+        Grid = grid;
+    }
+
+    /// <summary>The magnets.</summary>
+    public MagnetGeometry Geometry { get; }
+
+    /// <summary>The wave-number grid.</summary>
+    public WaveNumberGrid Grid { get; }
+
+    /// <summary>Number of odd harmonics that are not negligible in a block.</summary>
+    /// <param name="block">Block number.</param>
+    /// <returns>The number; a linear row has no bound and returns the largest integer.</returns>
+    internal int HarmonicCount(int block) => Grid.IsLinear
+        ? int.MaxValue
+        : Math.Max(FluxLinkageHarmonics.Count, AngularProjection.ResolvedHarmonics(Grid.PolePairs, (block + 1) * Grid.BlockWidth * Geometry.Reach));
+
+    /// <summary>Coefficients of one harmonic over one block.</summary>
+    /// <param name="block">Block number.</param>
+    /// <param name="index">Harmonic index j, n = 2 j + 1, below <see cref="HarmonicCount"/>.</param>
+    /// <returns>One coefficient per node.</returns>
+    internal ReadOnlySpan<double> Harmonic(int block, int index)
+    {
+        while (_blocks.Count <= block)
+        {
+            _blocks.Add([]);
+        }
+
+        List<double[]> lines = _blocks[block];
+        if (Grid.IsLinear)
+        {
+            while (lines.Count <= index)
+            {
+                lines.Add(LinearLine(block, lines.Count));
+            }
+        }
+        else if (lines.Count == 0)
+        {
+            AddAxialLines(block, lines);
+        }
+
+        return lines[index];
+    }
+
+    private double[] LinearLine(int block, int index)
+    {
+        double[] line = new double[Nodes];
+        double[] across = new double[Nodes];
+        Grid.Fill(block, across, line);
+        double kx = ((2 * index) + 1) * Math.PI / Grid.PolePitch;
+        for (int i = 0; i < Nodes; i++)
+        {
+            line[i] = 2.0 * LinearTransform.Magnet(Geometry, kx, across[i]) / Grid.PolePitch;
+        }
+
+        return line;
+    }
+
+    private void AddAxialLines(int block, List<double[]> lines)
+    {
+        IPlaneTransform transform = Geometry.Shape switch
+        {
+            MagnetShape.Block => new BlockTransform(Geometry.PitchRadius, Geometry.Length, Geometry.Width),
+            MagnetShape.Disc => RoundTransform.Disc(Geometry.PitchRadius, 0.5 * Geometry.Length),
+            _ => new SectorTransform(Geometry.InnerRadius, Geometry.OuterRadius, Geometry.SectorHalfAngle),
+        };
+        int harmonics = HarmonicCount(block);
+        double[] all = AngularProjection.Project(transform, Grid.PolePairs, harmonics, new PhaseTable(Grid, block));
+        double scale = 2.0 * Grid.PolePairs / Math.PI;
+        for (int j = 0; j < harmonics; j++)
+        {
+            double[] line = new double[Nodes];
+            PhaseTable.AddScaled(scale, all.AsSpan(j * Nodes, Nodes), line);
+            lines.Add(line);
+        }
+    }
+}
