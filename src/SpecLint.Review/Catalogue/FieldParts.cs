@@ -1,0 +1,160 @@
+using SpecLint.Physics.Geometry;
+using SpecLint.Physics.Magnetics;
+using SpecLint.Review.Figures;
+using CoilPlan = SpecLint.Physics.Magnetics.CoilGeometry;
+
+namespace SpecLint.Review.Catalogue;
+
+/// <summary>The gap field in pieces that are reused when a spec value changes: transforms of magnet and coil, layers, solution.</summary>
+internal static class FieldParts
+{
+    /// <summary>Magnets round the rotor or along the track.</summary>
+    public static PartDefinition<Shape<MagnetGeometry>> Row { get; } = new("row of magnets", ReadRow);
+
+    /// <summary>Plan of the coil for the field solution.</summary>
+    public static PartDefinition<Shape<CoilPlan>> Plan { get; } = new("plan of the coil", ReadPlan);
+
+    /// <summary>Transform of the magnets' outline.</summary>
+    public static PartDefinition<MagnetTransform> MagnetTransform { get; } = new("transform of the magnet", x =>
+        x.Part(Row) is { } row && x.Part(Plan) is { } plan
+            ? new MagnetTransform(row.Outline, WaveNumberGrid.For(row.Outline, plan.Outline))
+            : null);
+
+    /// <summary>Transform of the coil's turn density.</summary>
+    public static PartDefinition<CoilTransform> CoilTransform { get; } = new("transform of the coil", x =>
+        x.Part(Row) is { } row && x.Part(Plan) is { } plan
+            ? new CoilTransform(plan.Outline, WaveNumberGrid.For(row.Outline, plan.Outline))
+            : null);
+
+    /// <summary>Layers across the gap.</summary>
+    public static PartDefinition<Shape<MagneticLayers>> Layers { get; } = new("layers across the gap", ReadLayers);
+
+    /// <summary>The solved gap field per tesla of remanence.</summary>
+    public static PartDefinition<SpectralField> Field { get; } = new("harmonic solution of the gap field", ReadField);
+
+    private static Shape<MagnetGeometry>? ReadRow(Evaluation x)
+    {
+        bool linear = MachineParts.IsLinear(x);
+        double pairs = x.Figure("machine.pole-pairs");
+        double pitch = x.Figure("magnet.pole-pitch");
+        double gapBetween = x.Figure("magnet.spacing.innermost");
+        if (x.Part(MachineParts.Magnet) is not { } part || x.Incomplete)
+        {
+            return null;
+        }
+
+        if (gapBetween < 0)
+        {
+            return null;
+        }
+
+        MagnetOutline magnet = part.Outline;
+        return new(magnet.Shape switch
+        {
+            Physics.Geometry.MagnetShape.Disc when linear => MagnetGeometry.LinearDisc(pitch, magnet.Length),
+            Physics.Geometry.MagnetShape.Disc => MagnetGeometry.AxialDisc((int)pairs, magnet.PitchRadius, magnet.Length),
+            Physics.Geometry.MagnetShape.Sector => MagnetGeometry.AxialSector(
+                (int)pairs,
+                magnet.PitchRadius - (0.5 * magnet.Length),
+                magnet.PitchRadius + (0.5 * magnet.Length),
+                magnet.SectorAngle * pairs / Math.PI),
+            _ when linear => MagnetGeometry.LinearBlock(pitch, magnet.Length, magnet.Width),
+            _ => MagnetGeometry.AxialBlock((int)pairs, magnet.PitchRadius, magnet.Length, magnet.Width),
+        });
+    }
+
+    private static Shape<CoilPlan>? ReadPlan(Evaluation x)
+    {
+        if (x.Part(MachineParts.Coil) is not { } part)
+        {
+            return null;
+        }
+
+        return new(PlanOf(part.Outline));
+    }
+
+    /// <summary>The coil as the field solution takes it: turns mitred sharp.</summary>
+    /// <param name="coil">The coil.</param>
+    public static CoilPlan PlanOf(in Physics.Geometry.CoilOutline coil) => coil.Shape switch
+    {
+        Physics.Geometry.CoilShape.Keystone => CoilPlan.Keystone(coil.PitchRadius, coil.HoleLength, coil.HoleWidth, coil.LegWidth),
+        Physics.Geometry.CoilShape.Rectangle => CoilPlan.Rectangle(coil.PitchRadius, coil.HoleLength, coil.HoleWidth, coil.LegWidth),
+        _ => CoilPlan.Round(coil.PitchRadius, 0.5 * coil.HoleWidth, (0.5 * coil.HoleWidth) + coil.LegWidth),
+    };
+
+    private static Shape<MagneticLayers>? ReadLayers(Evaluation x)
+    {
+        Facing facing = MachineParts.FacingOf(x);
+        double thickness = x.Number("magnets.thickness");
+        double recoil = x.Figure("magnet.recoil-permeability");
+        double gap = facing == Facing.Nothing ? double.PositiveInfinity : x.Figure("gap.magnetic");
+        SteelPlate behind = ReadPlate(x, "rotor.back-iron");
+        SteelPlate opposite = facing == Facing.Plate ? ReadPlate(x, "rotor.return-plate") : SteelPlate.None;
+        if (x.Incomplete || !(thickness > 0) || !(gap > 0))
+        {
+            return null;
+        }
+
+        return new(new MagneticLayers
+        {
+            MagnetThickness = thickness,
+            Gap = facing == Facing.Nothing ? 0 : gap,
+            RecoilPermeability = recoil,
+            Opposite = facing switch
+            {
+                Facing.Magnets => OppositeSide.Magnets,
+                Facing.Plate => OppositeSide.Plate,
+                _ => OppositeSide.Open,
+            },
+            Behind = behind,
+            OppositePlate = opposite,
+        });
+    }
+
+    private static SteelPlate ReadPlate(Evaluation x, string section)
+    {
+        if (x.OptionalText(section) == "none")
+        {
+            return SteelPlate.None;
+        }
+
+        if (x.Optional($"{section}.material.relative-permeability") is { } stated)
+        {
+            return Plate(x, section, stated);
+        }
+
+        string material = x.Text($"{section}.material");
+        if (material == "ideal")
+        {
+            return SteelPlate.Ideal;
+        }
+
+        double? permeability = OurTables.All.Find("steels")?.FindRow("material", material)?.Number("relative-permeability");
+        return permeability is { } known ? Plate(x, section, known) : Plate(x, section, 1000);
+    }
+
+    private static SteelPlate Plate(Evaluation x, string section, double permeability)
+    {
+        const double LeastMagnetic = 10;
+        double thickness = x.Number($"{section}.thickness");
+        return permeability < LeastMagnetic
+            ? SteelPlate.None
+            : new SteelPlate { Thickness = thickness, RelativePermeability = permeability };
+    }
+
+    private static SpectralField? ReadField(Evaluation x)
+    {
+        double near = x.Number("gap.clearance") + (x.Optional("gap.cover") ?? 0);
+        double thickness = x.Number("winding.coil.thickness");
+        if (x.Part(MagnetTransform) is not { } magnets
+            || x.Part(CoilTransform) is not { } coil
+            || x.Part(Layers) is not { } layers
+            || x.Incomplete)
+        {
+            return null;
+        }
+
+        var layer = new CoilLayer { MidHeight = near + (0.5 * thickness), Thickness = thickness };
+        return new SpectralField(magnets, coil, layers.Outline, layer);
+    }
+}
