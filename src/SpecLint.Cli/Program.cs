@@ -17,7 +17,8 @@ internal static class Program
         CultureInfo.CurrentUICulture = CultureInfo.InvariantCulture;
         CultureInfo.DefaultThreadCurrentCulture = CultureInfo.InvariantCulture;
         CultureInfo.DefaultThreadCurrentUICulture = CultureInfo.InvariantCulture;
-        using var output = new StreamWriter(Console.OpenStandardOutput(), new UTF8Encoding(encoderShouldEmitUTF8Identifier: false))
+        using Stream standardOutput = Console.OpenStandardOutput();
+        using var output = new StreamWriter(standardOutput, new UTF8Encoding(encoderShouldEmitUTF8Identifier: false))
         {
             NewLine = "\n",
         };
@@ -26,7 +27,7 @@ internal static class Program
             NewLine = "\n",
             AutoFlush = true,
         };
-        return (int)Run(arguments, new Streams(output, error, Console.OpenStandardInput));
+        return (int)Run(arguments, new Streams(output, standardOutput, error, Console.OpenStandardInput));
     }
 
     /// <summary>Runs one command line.</summary>

@@ -76,7 +76,8 @@ internal static class ReviewRun
     {
         if (reviews.Count > 0 && request.PrintsJson)
         {
-            JsonSummary.Write(reviews, request.IncludesAll, streams.Output);
+            streams.Output.Flush();
+            JsonSummary.Write(reviews, sheet, streams.RawOutput);
         }
         else if (reviews.Count > 1)
         {

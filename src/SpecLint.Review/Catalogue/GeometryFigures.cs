@@ -47,7 +47,7 @@ internal static class GeometryFigures
         Define.Figure("coil.radial-offset", FigureUnit.Metre, "distance between the coil's and the magnet's pitch radius", "|{winding.coil.pitch-radius} − {magnet.mean-radius}|", Sources.Geometry, x =>
             MachineParts.IsLinear(x) ? x.NotApplicable("a linear machine has no radius")
             : x.Part(MachineParts.Coil) is { } coil ? x.Value(Math.Abs(coil.Outline.PitchRadius - x.Figure("magnet.mean-radius"))) : x.Stop()),
-        Define.Figure("stator.room", FigureUnit.Metre, "least room between the coils and hub, studs and housing, as far as they are stated", "least of {coil.radius.innermost} less {stator.hub-radius}, and {stator.housing-radius} or {stator.stud-circle} less {coil.radius.outermost}", Sources.Geometry, StatorRoom),
+        Define.Figure("stator.room", FigureUnit.Metre, "least room between the coils and hub, studs and housing, as far as they are stated", "least of {coil.radius.innermost} less {stator.hub-radius} or half of {stator.stud-circle}, and {stator.housing-radius} or half of {stator.fixings.circle} less {coil.radius.outermost}", Sources.Geometry, StatorRoom),
         Define.Figure("back-iron.overhang", FigureUnit.Metre, "least distance of a magnet's edge inside the edge of its steel; negative where it hangs over", "least of {rotor.back-iron.outer-radius} less the magnet's outermost point and its innermost point less {rotor.back-iron.inner-radius}", Sources.Geometry, BackIronOverhang),
         Define.Figure("speed.rim", FigureUnit.Velocity, "speed of the rim at overspeed", "{speed.overspeed} × {machine.outer-diameter} / 2", Sources.Geometry, x =>
             MachineParts.IsLinear(x) ? x.NotApplicable("a linear machine has no rim")
@@ -155,7 +155,12 @@ internal static class GeometryFigures
 
         if (x.Optional("stator.stud-circle") is { } studs)
         {
-            room = Math.Min(room, studs - x.Figure("coil.radius.outermost"));
+            room = Math.Min(room, x.Figure("coil.radius.innermost") - (studs / 2));
+        }
+
+        if (x.Optional("stator.fixings.circle") is { } fixings)
+        {
+            room = Math.Min(room, (fixings / 2) - ((x.Optional("stator.fixings.size") ?? 0) / 2) - x.Figure("coil.radius.outermost"));
         }
 
         if (double.IsPositiveInfinity(room))
