@@ -114,6 +114,12 @@ public sealed class SpectralField
     public double IdealAttractionForce(double remanentFluxDensity) =>
         (_idealForce ??= ForceIn(_ideal)).Value * remanentFluxDensity * remanentFluxDensity;
 
+    /// <summary>Sums over the magnets' spectrum.</summary>
+    internal SpectralSum Sum => _sum;
+
+    /// <summary>The layers with their real plates and unit recoil permeability.</summary>
+    internal MagneticLayers SlabLayers => _slab;
+
     private (double Value, double Error) ForceIn(MagneticLayers stack)
     {
         if (stack.Opposite == OppositeSide.Open)
