@@ -1,0 +1,59 @@
+using System.Collections.Immutable;
+using System.Text;
+using YamlDotNet.Core;
+
+namespace SpecLint.Spec.Yaml;
+
+/// <summary>Reads one YAML 1.2 document into a tree that keeps the place of every key and value.</summary>
+/// <remarks>
+/// Duplicate keys, keys that are no scalars, custom tags and a second document are faults; aliases and merge keys are
+/// expanded within the limits. No input makes it throw.
+/// </remarks>
+public static class YamlReader
+{
+    /// <summary>Reads bytes as UTF-8, with or without byte-order mark.</summary>
+    /// <param name="bytes">The bytes of the file.</param>
+    /// <param name="limits">The limits.</param>
+    public static YamlReadResult Read(ReadOnlySpan<byte> bytes, YamlLimits limits)
+    {
+        string? text = TextDecoder.Decode(bytes, limits, out var fault);
+        return text is null ? new YamlReadResult("", null, [fault!]) : Parse(text, limits);
+    }
+
+    /// <summary>Reads a text.</summary>
+    /// <param name="text">The text.</param>
+    /// <param name="limits">The limits.</param>
+    public static YamlReadResult Read(string text, YamlLimits limits)
+    {
+        if (Encoding.UTF8.GetByteCount(text) > limits.Bytes)
+        {
+            return Read(Encoding.UTF8.GetBytes(text), limits);
+        }
+
+        return TextDecoder.Unreadable(text) is { } fault ? new YamlReadResult("", null, [fault]) : Parse(text, limits);
+    }
+
+    private static YamlReadResult Parse(string text, YamlLimits limits)
+    {
+        var faults = new List<YamlFault>();
+        YamlNode? root = null;
+        try
+        {
+            root = new YamlTreeBuilder(new Parser(new StringReader(text)), limits, faults).ReadDocument();
+        }
+        catch (YamlLimitException limit)
+        {
+            faults.Add(limit.Fault);
+        }
+        catch (YamlException syntax)
+        {
+            faults.Add(YamlSyntaxFault.From(syntax, text));
+        }
+        catch (InvalidOperationException)
+        {
+            faults.Add(new YamlFault("the brackets, braces or commas of this text do not fit together", TextDecoder.PlaceAt(text, -1)));
+        }
+
+        return new YamlReadResult(text, root, [.. faults.OrderBy(f => f.Region)]);
+    }
+}
