@@ -61,11 +61,16 @@ internal static class QuantityText
         return (margin > 0 ? "+" : "") + text + " %";
     }
 
+    /// <summary>The number to nine significant digits: what the last bit of a processor's arithmetic does not change.</summary>
+    /// <param name="number">Any finite number.</param>
+    public static double Rounded(double number) => double.Parse(
+        number.ToString("E8", CultureInfo.InvariantCulture), NumberStyles.Float, CultureInfo.InvariantCulture);
+
     /// <summary>A plain number to four significant digits.</summary>
     /// <param name="number">Any finite number.</param>
     public static string Number(double number) => Number(number, Digits);
 
-    private static string Number(double number, int digits)
+    internal static string Number(double number, int digits)
     {
         if (number == 0)
         {

@@ -160,13 +160,7 @@ internal sealed class SarifResults
     {
         if (number is { } value && double.IsFinite(value))
         {
-            result.SetProperty(name, Rounded(convert(value)));
+            result.SetProperty(name, QuantityText.Rounded(convert(value)));
         }
     }
-
-    /// <summary>Nine significant digits: what the last bit of a processor's arithmetic cannot change.</summary>
-    private static double Rounded(double number) => double.Parse(
-        number.ToString("E8", System.Globalization.CultureInfo.InvariantCulture),
-        System.Globalization.NumberStyles.Float,
-        System.Globalization.CultureInfo.InvariantCulture);
 }
