@@ -347,7 +347,7 @@ internal sealed class ExpressionBinder(string text, ExpressionScope scope)
         }
     }
 
-    private static string Describe(Dimension dimension) => dimension == Dimension.None ? "a plain number" : dimension.ToString();
+    public static string Describe(Dimension dimension) => dimension == Dimension.None ? "a plain number" : dimension.ToString();
 
     private Typed? Choose(Token name, List<Typed> arguments, int end)
     {

@@ -37,7 +37,7 @@ public sealed class ExpressionParser
             return null;
         }
 
-        List<Token> tokens = Tokenizer.Cut(text, scope.FindUnit, out fault);
+        List<Token> tokens = Tokenizer.Cut(text, out fault);
         if (fault is not null)
         {
             return null;

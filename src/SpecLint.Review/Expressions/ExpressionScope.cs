@@ -5,7 +5,7 @@ using SpecLint.Spec.Units;
 
 namespace SpecLint.Review.Expressions;
 
-/// <summary>What an expression can name: figures, spec keys, units and reference tables.</summary>
+/// <summary>What an expression can name: figures, spec keys and reference tables.</summary>
 public sealed record ExpressionScope
 {
     /// <summary>The figures.</summary>
@@ -16,9 +16,6 @@ public sealed record ExpressionScope
 
     /// <summary>All spec keys, for suggestions.</summary>
     public required IReadOnlyCollection<string> KeyNames { get; init; }
-
-    /// <summary>The unit of a spelling, or null when there is none.</summary>
-    public required Func<string, NamedUnit?> FindUnit { get; init; }
 
     /// <summary>The reference tables.</summary>
     public ReferenceTables Tables { get; init; } = ReferenceTables.Empty;
@@ -49,9 +46,3 @@ public enum NamedKeyKind
 /// <param name="Dimension">Dimension of a number.</param>
 /// <param name="Words">The words a text may take; empty when it is free.</param>
 public sealed record NamedKey(string Key, NamedKeyKind Kind, Dimension Dimension, ImmutableArray<string> Words);
-
-/// <summary>A unit that an expression may name: value in SI = number × <paramref name="Factor"/> + <paramref name="Offset"/>.</summary>
-/// <param name="Dimension">Dimension.</param>
-/// <param name="Factor">SI value of one unit.</param>
-/// <param name="Offset">SI value of zero units; other than 0 for °C only.</param>
-public readonly record struct NamedUnit(Dimension Dimension, double Factor, double Offset);

@@ -1,4 +1,5 @@
 using System.Globalization;
+using SpecLint.Spec.Units;
 
 namespace SpecLint.Review.Expressions;
 
@@ -6,21 +7,16 @@ namespace SpecLint.Review.Expressions;
 internal sealed class Tokenizer
 {
     private readonly string _text;
-    private readonly Func<string, NamedUnit?> _findUnit;
     private readonly List<Token> _tokens = [];
     private int _at;
     private ExpressionFault? _fault;
 
-    private Tokenizer(string text, Func<string, NamedUnit?> findUnit)
-    {
-        _text = text;
-        _findUnit = findUnit;
-    }
+    private Tokenizer(string text) => _text = text;
 
     /// <summary>The words, closed by <see cref="TokenKind.End"/>; on a fault the list is of no use.</summary>
-    public static List<Token> Cut(string text, Func<string, NamedUnit?> findUnit, out ExpressionFault? fault)
+    public static List<Token> Cut(string text, out ExpressionFault? fault)
     {
-        var tokenizer = new Tokenizer(text, findUnit);
+        var tokenizer = new Tokenizer(text);
         tokenizer.Run();
         fault = tokenizer._fault;
         return tokenizer._tokens;
@@ -109,22 +105,22 @@ internal sealed class Tokenizer
 
         for (int length = word.Length; length > 0; length = word.AsSpan(0, length).LastIndexOfAny("/*·^"))
         {
-            string spelling = word[..length];
-            if (_findUnit(spelling) is { } unit)
+            if (UnitTable.TryFind(word.AsSpan(0, length), out UnitEntry? unit))
             {
                 _at = unitStart + length;
                 _tokens.Add(new Token(TokenKind.Number, start, _at - start, _text[start.._at])
                 {
-                    Number = (number * unit.Factor) + unit.Offset,
+                    Number = unit.ToSi(number),
                     Dimension = unit.Dimension,
-                    Unit = spelling,
+                    Unit = unit.Spelling,
                     IsPoint = unit.Offset != 0,
                 });
                 return;
             }
         }
 
-        Fail($"{word} is not a known unit", unitStart, word.Length);
+        string meant = UnitTable.Nearest(word) is { } near ? $"; did you mean {near.Spelling}?" : "";
+        Fail($"{word} is not a known unit{meant}", unitStart, word.Length);
     }
 
     private int UnitEnd(int start)

@@ -22,4 +22,8 @@ public sealed record RuleExamples(
     string Of,
     ImmutableArray<KeyValuePair<string, string>> Meets,
     ImmutableArray<KeyValuePair<string, string>> Breaks,
-    ImmutableArray<KeyValuePair<string, string>> BreaksBeyond);
+    ImmutableArray<KeyValuePair<string, string>> BreaksBeyond)
+{
+    /// <summary>Keys with the texts that bring the measure to its bound; empty when the rule has no such example.</summary>
+    public ImmutableArray<KeyValuePair<string, string>> Boundary { get; init; } = [];
+}

@@ -44,6 +44,9 @@ public sealed record Rule
     /// <summary>The finding's sentence; <c>{measure}</c>, <c>{bound}</c>, figure names and keys in braces are filled in.</summary>
     public required string Say { get; init; }
 
+    /// <summary>Unit in which measure and bound are shown; empty to follow the figures and literals they name.</summary>
+    public string DisplayUnit { get; init; } = "";
+
     /// <summary>Why the rule stands.</summary>
     public required string Why { get; init; }
 
@@ -64,6 +67,12 @@ public sealed record Rule
 
     /// <summary>Where the rule stands in its rulebook.</summary>
     public required Region Region { get; init; }
+
+    /// <summary>The gravest grade that the rule can give.</summary>
+    public Grade GravestGrade => Beyond is { } beyond && beyond.Grade > Grade ? beyond.Grade : Grade;
+
+    /// <summary><see cref="Say"/> cut at its gaps; null for a rule made without a rulebook, whose sentence stands as it is.</summary>
+    internal MessageTemplate? Template { get; init; }
 }
 
 /// <summary>Who decides whether a rule is met.</summary>
