@@ -1,6 +1,7 @@
 using System.CommandLine;
 using SpecLint.Cli.Reviewing;
 using SpecLint.Reporting.Listings;
+using SpecLint.Review.Catalogue;
 using SpecLint.Review.Expressions;
 using SpecLint.Review.Rules;
 

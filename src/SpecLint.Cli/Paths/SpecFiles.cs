@@ -35,7 +35,7 @@ internal static class SpecFiles
         return files;
     }
 
-    private static IEnumerable<string> Resolve(string path, List<string> problems)
+    private static List<string> Resolve(string path, List<string> problems)
     {
         if (path == StandardInput || File.Exists(path))
         {

@@ -1,3 +1,4 @@
+using SpecLint.Reporting.Output;
 using SpecLint.Reporting.Sheets;
 using SpecLint.Review.Catalogue;
 using SpecLint.Review.Figures;
@@ -23,9 +24,9 @@ internal static class SingleSpec
     {
         foreach (SpecFault fault in spec.Faults)
         {
-            streams.Error.WriteLine($"spec-lint: {Printable.Line(ReviewWords.Place(spec, fault.Region.StartLine))}: {Printable.Line(fault.Message)}");
+            streams.Error.WriteLine($"spec-lint: {ReviewWords.Place(spec, fault.Region.StartLine)}: {Printable.Line(fault.Message)}");
         }
 
-        return Reviewer.HasMachine(spec) ? new FigureGraph(spec, OurFigures.Catalogue) : null;
+        return ReadingReview.LeavesMachine(spec) ? new FigureGraph(spec, OurFigures.Catalogue) : null;
     }
 }

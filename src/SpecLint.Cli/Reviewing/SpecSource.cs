@@ -1,5 +1,6 @@
 using SpecLint.Cli.Paths;
 using SpecLint.Spec.Documents;
+using SpecLint.Spec.Yaml;
 
 namespace SpecLint.Cli.Reviewing;
 
@@ -66,7 +67,7 @@ internal static class SpecSource
         using var buffer = new MemoryStream();
         var chunk = new byte[64 * 1024];
         int read;
-        while (buffer.Length < SpecReader.MostBytes + 1L && (read = stream.Read(chunk)) > 0)
+        while (buffer.Length < YamlLimits.Default.Bytes + 1L && (read = stream.Read(chunk)) > 0)
         {
             buffer.Write(chunk, 0, read);
         }

@@ -4,7 +4,7 @@ using System.Text;
 namespace SpecLint.Reporting.Output;
 
 /// <summary>Makes text of unknown origin harmless on a terminal and in a report.</summary>
-internal static class Printable
+public static class Printable
 {
     /// <summary>
     /// One line of text: white space of any kind becomes one space; control characters, terminal escapes, marks that turn

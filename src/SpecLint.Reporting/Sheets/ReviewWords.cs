@@ -10,7 +10,7 @@ using SpecLint.Spec.Documents;
 namespace SpecLint.Reporting.Sheets;
 
 /// <summary>Reviews and findings in words.</summary>
-internal static class ReviewWords
+public static class ReviewWords
 {
     /// <summary>The word of an outcome.</summary>
     /// <param name="outcome">The outcome.</param>

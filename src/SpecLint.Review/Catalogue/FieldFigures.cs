@@ -16,7 +16,7 @@ internal static class FieldFigures
         x.Part(FieldParts.Row) is { } row && x.Part(FieldParts.Layers) is { } layers ? new ImageField(row.Outline, layers.Outline) : null);
 
     /// <summary>Flux of one pole.</summary>
-    public static PartDefinition<PoleFlux> Flux { get; } = new("flux of one pole", x => x.Part(FieldParts.Field) is { } field ? new PoleFlux(field) : null);
+    public static PartDefinition<PoleFlux> Flux { get; } = new("flux of one pole", x => x.Part(FieldParts.Field) is { } solved ? new PoleFlux(solved) : null);
 
     public static IEnumerable<FigureDefinition> All =>
     [

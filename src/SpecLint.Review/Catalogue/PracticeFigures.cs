@@ -63,7 +63,8 @@ internal static class PracticeFigures
 
         if (x.Optional("winding.wire.thermal-class") is { } ofWire)
         {
-            least = Math.Min(least, ofWire);
+            // The spec writes the class as a bare number of degrees Celsius, as IEC 60085 does.
+            least = Math.Min(least, ofWire + Celsius);
         }
 
         if (double.IsPositiveInfinity(least))

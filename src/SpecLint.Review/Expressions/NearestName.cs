@@ -1,15 +1,19 @@
 namespace SpecLint.Review.Expressions;
 
 /// <summary>Finds the known name that a mistyped one most likely means.</summary>
-internal static class NearestName
+public static class NearestName
 {
     private const int LongestName = 80;
 
     /// <summary>A phrase such as <c>; did you mean gap.magnetic?</c>, or empty when nothing is near.</summary>
+    /// <param name="written">The name as written.</param>
+    /// <param name="known">The names there are.</param>
     public static string Suggestion(string written, IEnumerable<string> known) =>
         Of(written, known) is { } name ? $"; did you mean {name}?" : "";
 
     /// <summary>The known name nearest to the written one, or null when none is within a third of its length.</summary>
+    /// <param name="written">The name as written.</param>
+    /// <param name="known">The names there are.</param>
     public static string? Of(string written, IEnumerable<string> known)
     {
         if (written.Length is 0 or > LongestName)

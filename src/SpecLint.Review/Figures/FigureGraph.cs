@@ -124,7 +124,7 @@ public sealed class FigureGraph
     internal T? Part<T>(PartDefinition<T> part, out Outcome obstacle)
         where T : class
     {
-        if (!_nodes.TryGetValue(part.Name, out var node))
+        if (!_nodes.TryGetValue(part.Name, out var node) || node.IsForgotten)
         {
             var evaluation = new Evaluation(this, definition: null);
             T? value = part.Compute(evaluation);
@@ -143,6 +143,21 @@ public sealed class FigureGraph
     /// <param name="partName">Name of the part.</param>
     public ImmutableArray<FigureInput> PartInputs(string partName) =>
         _nodes.TryGetValue(partName, out var node) ? node.Inputs : [];
+
+    /// <summary>
+    /// Lets go of the intermediate results, which are large, once everything of interest is computed. Figures, their
+    /// inputs and what they depend on stay; a figure not yet computed would compute its parts anew.
+    /// </summary>
+    public void ForgetParts()
+    {
+        foreach (var (name, node) in _nodes)
+        {
+            if (node.Result is not Figure && node.Result is not null)
+            {
+                _nodes[name] = node with { Result = null, IsForgotten = true };
+            }
+        }
+    }
 
     private HashSet<string> KeysOf(ImmutableArray<FigureInput> inputs)
     {
@@ -165,5 +180,7 @@ public sealed class FigureGraph
     private sealed record Node(object? Result, Outcome Obstacle, IReadOnlySet<string> Keys)
     {
         public ImmutableArray<FigureInput> Inputs { get; init; } = [];
+
+        public bool IsForgotten { get; init; }
     }
 }

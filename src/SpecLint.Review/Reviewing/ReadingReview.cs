@@ -7,7 +7,7 @@ using SpecLint.Spec.Yaml;
 namespace SpecLint.Review.Reviewing;
 
 /// <summary>Turns the faults of a spec into findings and decides whether they leave a machine to compute.</summary>
-internal static class ReadingReview
+public static class ReadingReview
 {
     private static readonly string[] MachineKeys = ["machine.topology", "machine.arrangement", "machine.stator"];
 
@@ -44,6 +44,7 @@ internal static class ReadingReview
     }
 
     /// <summary>True when topology, arrangement and stator are read and covered, so that figures mean something.</summary>
+    /// <param name="spec">The spec.</param>
     public static bool LeavesMachine(SpecDocument spec) =>
         Array.TrueForAll(MachineKeys, key => spec.Find(key) is not null && !spec.Faults.Any(f => string.Equals(f.Key, key, StringComparison.Ordinal)));
 
