@@ -29,6 +29,20 @@ internal sealed class DiscSheet : IChargeSheet
         return inside - (4.0 * Math.PI * EndTerm(_radius, rho, Math.Abs(z)));
     }
 
+    /// <inheritdoc/>
+    public (double X, double Y) InPlane(double x, double y, double z)
+    {
+        double dx = x - _centre;
+        double rho = double.Hypot(dx, y);
+        if (!(rho > 0.0))
+        {
+            return (0.0, 0.0);
+        }
+
+        double scale = -4.0 * Math.PI * RadialTerm(_radius, rho, z) / rho;
+        return (scale * dx, scale * y);
+    }
+
     /// <summary>Normal flux density of one end of a cylindrical solenoid of unit surface polarisation.</summary>
     /// <param name="radius">Radius of the cylinder [m].</param>
     /// <param name="rho">Distance from its axis [m].</param>

@@ -67,6 +67,35 @@ public sealed class ImageField
     /// <returns>The field [-]; its mean over a magnet is the demagnetising factor.</returns>
     public double OpposingField(double x, double y, double height) => -NormalFluxDensity(x, y, height, 1.0);
 
+    /// <summary>Vector of mu0 H over the remanence anywhere in the magnets' layer or the gap.</summary>
+    /// <param name="x">Position along the radius [m].</param>
+    /// <param name="y">Position along the motion [m].</param>
+    /// <param name="height">Height relative to the magnets' face [m].</param>
+    /// <returns>Components along x, y and the height [-].</returns>
+    public (double X, double Y, double Z) FieldStrength(double x, double y, double height)
+    {
+        double sumX = 0.0;
+        double sumY = 0.0;
+        double sumZ = 0.0;
+        foreach ((double at, double sign) in _sheets)
+        {
+            foreach ((double cosine, double sine, double shift, double weight) in _poles)
+            {
+                double px = (x * cosine) + (y * sine);
+                double py = (y * cosine) - (x * sine) - shift;
+                double z = height - at;
+                double charge = sign * weight;
+                (double hx, double hy) = _sheet.InPlane(px, py, z);
+                sumX += charge * ((hx * cosine) - (hy * sine));
+                sumY += charge * ((hy * cosine) + (hx * sine));
+                sumZ += (z >= 0.0 ? charge : -charge) * _sheet.SolidAngle(px, py, z);
+            }
+        }
+
+        const double Scale = 1.0 / (4.0 * Math.PI);
+        return (sumX * Scale, sumY * Scale, sumZ * Scale);
+    }
+
     private double RowSolidAngle(double x, double y, double z)
     {
         double sum = 0.0;

@@ -88,12 +88,8 @@ internal sealed class PolygonSheet : IChargeSheet
         return 2.0 * (angle < -Rounding ? angle + (2.0 * Math.PI) : angle);
     }
 
-    /// <summary>In-plane field integral: the sum over edges of outward normal times the integral of dl/s.</summary>
-    /// <param name="x">Position along x [m].</param>
-    /// <param name="y">Position along y [m].</param>
-    /// <param name="z">Height over the sheet [m].</param>
-    /// <returns>Components along x and y [-]; the field of unit surface charge is this over 4 pi.</returns>
-    /// <remarks>Logarithmically infinite on an edge.</remarks>
+    /// <inheritdoc/>
+    /// <remarks>The sum over edges of the outward normal times the integral of dl/s along the edge.</remarks>
     public (double X, double Y) InPlane(double x, double y, double z)
     {
         double sumX = 0.0;

@@ -13,9 +13,11 @@ internal sealed class RoundTransform : IPlaneTransform
     private readonly double _centre;
     private readonly double _inner;
     private readonly double _outer;
+    private readonly bool _slope;
 
-    private RoundTransform(double centre, double inner, double outer)
+    private RoundTransform(double centre, double inner, double outer, bool slope = false)
     {
+        _slope = slope;
         _centre = centre;
         _inner = inner;
         _outer = outer;
@@ -28,6 +30,11 @@ internal sealed class RoundTransform : IPlaneTransform
     /// <param name="radius">Distance from the machine axis [m].</param>
     /// <returns>The transform.</returns>
     public static RoundTransform Point(double radius) => new(radius, 0.0, 0.0);
+
+    /// <summary>The derivative of a point's transform by wave number times radius: J_m' in place of J_m.</summary>
+    /// <param name="radius">Distance from the machine axis [m].</param>
+    /// <returns>The transform.</returns>
+    public static RoundTransform PointSlope(double radius) => new(radius, 0.0, 0.0, slope: true);
 
     /// <summary>A uniform disc.</summary>
     /// <param name="radius">Distance of the centre [m].</param>
@@ -46,13 +53,19 @@ internal sealed class RoundTransform : IPlaneTransform
     public void Sample((double Cosine, double Sine) direction, bool odd, PhaseTable table, Span<double> value)
     {
         double u = _centre * direction.Cosine;
-        if (odd)
+        if (odd != _slope)
         {
             table.Fill(u, table.Line(0), value);
         }
         else
         {
             table.Fill(u, value, table.Line(0));
+        }
+
+        if (_slope)
+        {
+            table.Line(0).Fill(odd ? direction.Cosine : -direction.Cosine);
+            PhaseTable.Multiply(table.Line(0), value);
         }
     }
 
