@@ -8,7 +8,6 @@ namespace SpecLint.Review.Catalogue;
 internal static class FieldFigures
 {
     private const double ImplantCaution = 0.5e-3;
-    private const double QuarterSteps = 12;
     private const double SaturationOnset = 1.6;
 
     /// <summary>The field at single points, up to the magnets' face.</summary>
@@ -17,6 +16,9 @@ internal static class FieldFigures
 
     /// <summary>Flux of one pole.</summary>
     public static PartDefinition<PoleFlux> Flux { get; } = new("flux of one pole", x => x.Part(FieldParts.Field) is { } solved ? new PoleFlux(solved) : null);
+
+    /// <summary>Harmonics of the field inside the winding.</summary>
+    public static PartDefinition<WindingField> Winding { get; } = new("field inside the winding", x => x.Part(FieldParts.Field) is { } solved ? new WindingField(solved) : null);
 
     public static IEnumerable<FigureDefinition> All =>
     [
@@ -28,7 +30,9 @@ internal static class FieldFigures
         Define.Figure("mass.magnets", FigureUnit.Kilogram, "mass of all magnets", "number of magnets × {magnet.face-area} × {magnets.thickness} × {magnet.density}", Sources.Geometry, MagnetMass),
         Define.Figure("magnet.face-area", FigureUnit.Area, "area of one magnet's face", "{magnet.extent} × {magnet.length}", Sources.Geometry, x => x.Value(x.Figure("magnet.extent") * x.Figure("magnet.length"))),
         Define.Figure("field.mid-coil.centre", FigureUnit.Tesla, "flux density normal to the coil at its middle, on a pole centre at the mean radius, magnets at 20 °C", "image sums of the magnets' charge sheets, corrected for recoil permeability and plates", Sources.Field, x => AtHeight(x, 0)) with { MethodUncertainty = 0.005 },
-        Define.Figure("field.mid-coil.fundamental", FigureUnit.Tesla, "fundamental of the flux density along the motion at the coil's middle height and the mean radius", "Fourier sum of {field.mid-coil.centre} along one pole", Sources.Field, Fundamental) with { MethodUncertainty = 0.005 },
+        Define.Figure("field.mid-coil.fundamental", FigureUnit.Tesla, "fundamental of the flux density along the motion at the coil's middle height and the mean radius", "first harmonic of the harmonic solution at the mean radius, times {magnet.remanence}", Sources.Field, Fundamental) with { MethodUncertainty = 0.005 },
+        Define.Figure("field.legs.weighted", FigureUnit.Tesla, "root of the mean over the legs of Σ(n·B_n)², field across the wire, peak amplitudes: what drives eddy currents", "harmonics up to 31 of the field inside the legs, each times its order", Sources.Field, x => Weighted(x, (w, b) => w.Legs(b))) with { MethodUncertainty = 0.02 },
+        Define.Figure("field.bars.weighted", FigureUnit.Tesla, "the same over the coil's end bars", "harmonics up to 31 of the field inside the end bars, each times its order", Sources.Field, x => Weighted(x, (w, b) => w.EndBars(b))) with { MethodUncertainty = 0.02 },
         Define.Figure("field.coil.lowest", FigureUnit.Tesla, "lowest flux density through the coil's thickness on a pole centre", "image sums over the coil's thickness", Sources.Field, x => Extreme(x, highest: false)) with { MethodUncertainty = 0.005 },
         Define.Figure("field.coil.highest", FigureUnit.Tesla, "highest flux density through the coil's thickness on a pole centre", "image sums over the coil's thickness", Sources.Field, x => Extreme(x, highest: true)) with { MethodUncertainty = 0.005 },
         Define.Figure("flux.pole", FigureUnit.Weber, "flux of one pole through the plane at the coil's middle, all radii", "integral of the harmonic solution between the interpole lines, times {magnet.remanence}", Sources.Field, PoleFluxAtCoil) with { MethodUncertainty = 0.005 },
@@ -151,26 +155,17 @@ internal static class FieldFigures
     private static Outcome Fundamental(Evaluation x)
     {
         double remanence = x.Figure("magnet.remanence");
-        double pitch = x.Figure("magnet.pole-pitch");
-        bool linear = MachineParts.IsLinear(x);
-        if (x.Part(Points) is not { } points || x.Part(FieldParts.Field) is not { } field || x.Incomplete)
-        {
-            return x.Stop();
-        }
+        return x.Part(Winding) is { } winding && x.Part(FieldParts.Field) is { } field && !x.Incomplete
+            ? x.Value(Math.Abs(winding.NormalFundamental(field.Magnets.Geometry.PitchRadius, field.Layer.MidHeight, remanence)))
+            : x.Stop();
+    }
 
-        // Odd harmonics only: a quarter of the period holds everything. Trapezoid weights, the last point is a zero.
-        double radius = points.Magnets.PitchRadius;
-        double sum = 0;
-        for (int step = 0; step < QuarterSteps; step++)
-        {
-            double electrical = 0.5 * Math.PI * step / QuarterSteps;
-            double arc = electrical * pitch / Math.PI;
-            (double across, double along) = linear ? (radius, arc) : (radius * Math.Cos(arc / radius), radius * Math.Sin(arc / radius));
-            double weight = step == 0 ? 1 : 2;
-            sum += weight * Math.Cos(electrical) * points.NormalFluxDensity(across, along, field.Layer.MidHeight, remanence);
-        }
-
-        return x.Value(Math.Abs(sum / QuarterSteps * Correction(field)));
+    private static Outcome Weighted(Evaluation x, Func<WindingField, double, WindingFieldSquares> squares)
+    {
+        double remanence = x.Figure("magnet.remanence");
+        return x.Part(Winding) is { } winding && !x.Incomplete
+            ? x.Value(Math.Sqrt(squares(winding, remanence).AcrossWire))
+            : x.Stop();
     }
 
     private static Outcome PoleFluxAtCoil(Evaluation x)

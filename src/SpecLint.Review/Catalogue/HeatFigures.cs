@@ -26,7 +26,7 @@ internal static class HeatFigures
             double current = x.Figure("current.phase.rms");
             return x.Value(x.Number("machine.phases") * current * current * x.Figure("resistance.phase.hot"));
         }),
-        Define.Figure("loss.winding-eddy", FigureUnit.Watt, "eddy-current loss in the strands of all legs at rated speed, wire at 20 °C", "{mass.copper} in the legs × ω² × Σ(n·B_n)² × {winding.wire.size}² / (32 ρ), both field components averaged over the leg", Sources.StrandEddy, Eddy) with { MethodUncertainty = EddyMethod },
+        Define.Figure("loss.winding-eddy", FigureUnit.Watt, "eddy-current loss in the strands of all legs at rated speed, wire at 20 °C", "copper volume × ω² × Σ(n·B_n)² × {winding.wire.size}² / (32 ρ), with {field.legs.weighted} in the legs and {field.bars.weighted} in the end bars", Sources.StrandEddy, Eddy) with { MethodUncertainty = EddyMethod },
         Define.Figure("loss.winding-circulation", FigureUnit.Watt, "loss of currents that circulate between untransposed strands in hand at rated speed, upper estimate", "strand EMF differences across the bundle over the strands' resistance", new Basis(BasisKind.Derived, "EMF difference of strands laid side by side; effect described by Wang and Kamper, IEEE Trans. Energy Convers. 19 (2004)"), Circulation) with { MethodUncertainty = 0.5, IsCoarse = true },
         Define.Figure("loss.winding-ac.share", FigureUnit.Percent, "eddy and circulating loss over rated power", "({loss.winding-eddy} + {loss.winding-circulation}) / {power.rated}", Sources.Arithmetic, x =>
             x.Value((x.Figure("loss.winding-eddy") + (x.OptionalFigure("loss.winding-circulation") ?? 0)) / x.Figure("power.rated"))),
@@ -44,13 +44,20 @@ internal static class HeatFigures
 
     private static Outcome Eddy(Evaluation x)
     {
-        double weighted = x.Figure("field.leg.weighted-square");
+        double legs = x.Figure("field.legs.weighted");
+        double bars = x.Figure("field.bars.weighted");
         double speed = RatingFigures.ElectricalSpeed(x);
-        double legs = x.Number("winding.coils") * x.Figure("fill.conductors") * 2 * x.Figure("coil.hole.length") * x.Figure("wire.section");
         double diameter = x.Number("winding.wire.size");
-        return x.Part(ConductorFigures.Wire) is { } wire && !x.Incomplete
-            ? x.Value(legs * StrandEddyLoss.PerVolume(speed, weighted, diameter, wire.Outline.Material.Resistivity))
-            : x.Stop();
+        double wires = x.Number("winding.coils") * x.Figure("fill.conductors") * x.Figure("wire.section");
+        if (x.Part(ConductorFigures.Wire) is not { } wire || x.Part(MachineParts.Coil) is not { } coil || x.Incomplete)
+        {
+            return x.Stop();
+        }
+
+        double length = wire.Outline.MeanTurnLength;
+        double legLength = Math.Min(2 * coil.Outline.HoleLength, length);
+        double square = (legLength * legs * legs) + ((length - legLength) * bars * bars);
+        return x.Value(wires * StrandEddyLoss.PerVolume(speed, square, diameter, wire.Outline.Material.Resistivity));
     }
 
     private static Outcome Circulation(Evaluation x)
