@@ -1,3 +1,5 @@
+using System.Runtime.InteropServices;
+
 namespace SpecLint.Physics.Magnetics;
 
 /// <summary>Field of an alternating magnet array at single points, by magnetic charge sheets and their images.</summary>
@@ -13,26 +15,55 @@ namespace SpecLint.Physics.Magnetics;
 public sealed class ImageField
 {
     private const double DampingExponent = 17.0;
+    private const double PerSolidAngle = 0.25 / Math.PI;
+
+    /// <summary>Angle of a chord of a sector's arc, for points in the gap and inside the magnet [degree].</summary>
+    private const double FineChord = 2.5;
+    private const double CoarseChord = 8.0;
+
+    /// <summary>Distance over magnet length plus pole pitch below which a cloud is taken dense.</summary>
+    private const double CloseShare = 0.8;
     private const int ImageCap = 60;
     private const int FarthestPole = 10;
     private static readonly double[] EulerWeights = [15.0 / 16.0, 11.0 / 16.0, 5.0 / 16.0, 1.0 / 16.0];
     private readonly IChargeSheet _sheet;
     private readonly List<(double Height, double Sign)> _sheets = [];
-    private readonly List<(double Cosine, double Sine, double Shift, double Weight)> _poles = [];
+    private readonly List<Pole> _poles = [];
+    private readonly double _dampingExponent;
+    private readonly int _farthestPole;
+    private readonly double _nearDistance;
+    private readonly ChargeCloud _dense;
+    private readonly ChargeCloud _sparse;
 
     /// <summary>Prepares the sheets of an array.</summary>
     /// <param name="magnets">The magnets; their <see cref="MagnetGeometry.DomainFault"/> must be null.</param>
     /// <param name="layers">The layers; steel is taken as ideal and the recoil permeability as 1.</param>
     public ImageField(MagnetGeometry magnets, MagneticLayers layers)
+        : this(magnets, layers, DampingExponent, FarthestPole, 0.0)
     {
+    }
+
+    /// <summary>Prepares sheets of lesser reach, divided into near and far ones.</summary>
+    /// <param name="magnets">The magnets.</param>
+    /// <param name="layers">The layers.</param>
+    /// <param name="dampingExponent">Exponent at which the image sum ends.</param>
+    /// <param name="farthestPole">Poles to either side that are summed.</param>
+    /// <param name="nearDistance">Sheets of the magnet and its neighbours this near to the magnet's body count as near [m].</param>
+    internal ImageField(MagnetGeometry magnets, MagneticLayers layers, double dampingExponent, int farthestPole, double nearDistance)
+    {
+        _dampingExponent = dampingExponent;
+        _farthestPole = farthestPole;
+        _nearDistance = nearDistance;
         Magnets = magnets;
         Layers = layers;
         _sheet = magnets.Shape switch
         {
             MagnetShape.Block => PolygonSheet.Rectangle(magnets.PitchRadius, magnets.Length, magnets.Width),
             MagnetShape.Disc => new DiscSheet(magnets.PitchRadius, 0.5 * magnets.Length),
-            _ => PolygonSheet.Sector(magnets.InnerRadius, magnets.OuterRadius, magnets.SectorHalfAngle),
+            _ => PolygonSheet.Sector(magnets, nearDistance > 0.0 ? CoarseChord : FineChord),
         };
+        _dense = new ChargeCloud(magnets, 4);
+        _sparse = new ChargeCloud(magnets, 2);
         AddSheets();
         AddPoles();
     }
@@ -57,7 +88,7 @@ public sealed class ImageField
             sum += (height >= at ? sign : -sign) * RowSolidAngle(x, y, height - at);
         }
 
-        return remanentFluxDensity * sum / (4.0 * Math.PI);
+        return remanentFluxDensity * sum * PerSolidAngle;
     }
 
     /// <summary>Opposing field inside the magnets' layer per unit remanence, -mu0 H_z/B_r.</summary>
@@ -72,38 +103,123 @@ public sealed class ImageField
     /// <param name="y">Position along the motion [m].</param>
     /// <param name="height">Height relative to the magnets' face [m].</param>
     /// <returns>Components along x, y and the height [-].</returns>
-    public (double X, double Y, double Z) FieldStrength(double x, double y, double height)
+    public (double X, double Y, double Z) FieldStrength(double x, double y, double height) => Strength(x, y, height, nearOnly: false);
+
+    /// <summary>The share of the near sheets in <see cref="FieldStrength"/>.</summary>
+    /// <param name="x">Position along the radius [m].</param>
+    /// <param name="y">Position along the motion [m].</param>
+    /// <param name="height">Height relative to the magnets' face [m].</param>
+    /// <returns>Components along x, y and the height [-].</returns>
+    internal (double X, double Y, double Z) NearFieldStrength(double x, double y, double height) => Strength(x, y, height, nearOnly: true);
+
+    /// <summary>The share of all other sheets in <see cref="FieldStrength"/>, each as a cloud of point charges.</summary>
+    /// <param name="x">Position along the radius [m].</param>
+    /// <param name="y">Position along the motion [m].</param>
+    /// <param name="height">Height relative to the magnets' face [m].</param>
+    /// <returns>Components along x, y and the height [-].</returns>
+    internal (double X, double Y, double Z) FarFieldStrength(double x, double y, double height)
+    {
+        double sumX = 0.0;
+        double sumY = 0.0;
+        double sumZ = 0.0;
+        double close = CloseShare * (Magnets.Length + Magnets.PitchArc);
+        foreach ((double at, double sign) in _sheets)
+        {
+            bool nearSheet = IsNear(at);
+            foreach (Pole pole in _poles)
+            {
+                if (nearSheet && pole.IsNeighbour)
+                {
+                    continue;
+                }
+
+                (double px, double py) = pole.Enter(x, y);
+                double z = height - at;
+                double aside = px - Magnets.PitchRadius;
+                ChargeCloud cloud = (aside * aside) + (py * py) + (z * z) < close * close ? _dense : _sparse;
+                (double hx, double hy, double hz) = cloud.Field(px, py, z);
+                (hx, hy) = pole.Leave(hx, hy);
+                double charge = sign * pole.Weight;
+                sumX += charge * hx;
+                sumY += charge * hy;
+                sumZ += charge * hz;
+            }
+        }
+
+        return (sumX * PerSolidAngle, sumY * PerSolidAngle, sumZ * PerSolidAngle);
+    }
+
+    /// <summary>The normal component of <see cref="NearFieldStrength"/>.</summary>
+    /// <param name="x">Position along the radius [m].</param>
+    /// <param name="y">Position along the motion [m].</param>
+    /// <param name="height">Height relative to the magnets' face [m].</param>
+    /// <returns>The component [-].</returns>
+    internal double NearNormal(double x, double y, double height)
+    {
+        double sum = 0.0;
+        foreach ((double at, double sign) in _sheets)
+        {
+            if (!IsNear(at))
+            {
+                continue;
+            }
+
+            foreach (Pole pole in _poles)
+            {
+                if (pole.IsNeighbour)
+                {
+                    (double px, double py) = pole.Enter(x, y);
+                    double z = height - at;
+                    sum += (z >= 0.0 ? sign : -sign) * pole.Weight * _sheet.SolidAngle(px, py, z);
+                }
+            }
+        }
+
+        return sum * PerSolidAngle;
+    }
+
+    private bool IsNear(double at) => Math.Max(at, -Layers.MagnetThickness - at) < _nearDistance;
+
+    private (double X, double Y, double Z) Strength(double x, double y, double height, bool nearOnly)
     {
         double sumX = 0.0;
         double sumY = 0.0;
         double sumZ = 0.0;
         foreach ((double at, double sign) in _sheets)
         {
-            foreach ((double cosine, double sine, double shift, double weight) in _poles)
+            if (nearOnly && !IsNear(at))
             {
-                double px = (x * cosine) + (y * sine);
-                double py = (y * cosine) - (x * sine) - shift;
+                continue;
+            }
+
+            foreach (Pole pole in _poles)
+            {
+                if (nearOnly && !pole.IsNeighbour)
+                {
+                    continue;
+                }
+
+                (double px, double py) = pole.Enter(x, y);
                 double z = height - at;
-                double charge = sign * weight;
+                double charge = sign * pole.Weight;
                 (double hx, double hy) = _sheet.InPlane(px, py, z);
-                sumX += charge * ((hx * cosine) - (hy * sine));
-                sumY += charge * ((hy * cosine) + (hx * sine));
+                (hx, hy) = pole.Leave(hx, hy);
+                sumX += charge * hx;
+                sumY += charge * hy;
                 sumZ += (z >= 0.0 ? charge : -charge) * _sheet.SolidAngle(px, py, z);
             }
         }
 
-        const double Scale = 1.0 / (4.0 * Math.PI);
-        return (sumX * Scale, sumY * Scale, sumZ * Scale);
+        return (sumX * PerSolidAngle, sumY * PerSolidAngle, sumZ * PerSolidAngle);
     }
 
     private double RowSolidAngle(double x, double y, double z)
     {
         double sum = 0.0;
-        foreach ((double cosine, double sine, double shift, double weight) in _poles)
+        foreach (Pole pole in _poles)
         {
-            double px = (x * cosine) + (y * sine);
-            double py = (y * cosine) - (x * sine) - shift;
-            sum += weight * _sheet.SolidAngle(px, py, z);
+            (double px, double py) = pole.Enter(x, y);
+            sum += pole.Weight * _sheet.SolidAngle(px, py, z);
         }
 
         return sum;
@@ -111,9 +227,9 @@ public sealed class ImageField
 
     private void AddPoles()
     {
-        int last = Magnets.IsLinear ? FarthestPole : Magnets.PolePairs;
-        bool whole = !Magnets.IsLinear && last <= FarthestPole;
-        int far = Math.Min(last, FarthestPole);
+        int last = Magnets.IsLinear ? _farthestPole : Magnets.PolePairs;
+        bool whole = !Magnets.IsLinear && last <= _farthestPole;
+        int far = Math.Min(last, _farthestPole);
         for (int j = -far; j <= far; j++)
         {
             if (whole && j == -far)
@@ -125,7 +241,14 @@ public sealed class ImageField
             double weight = !whole && fromEnd < EulerWeights.Length ? EulerWeights[^(fromEnd + 1)] : 1.0;
             weight = j % 2 == 0 ? weight : -weight;
             (double sine, double cosine) = Magnets.IsLinear ? (0.0, 1.0) : Math.SinCos(j * Math.PI / Magnets.PolePairs);
-            _poles.Add((cosine, sine, Magnets.IsLinear ? j * Magnets.PolePitch : 0.0, weight));
+            _poles.Add(new Pole
+            {
+                Cosine = cosine,
+                Sine = sine,
+                Shift = Magnets.IsLinear ? j * Magnets.PolePitch : 0.0,
+                Weight = weight,
+                IsNeighbour = Math.Abs(j) <= 1,
+            });
         }
     }
 
@@ -168,12 +291,44 @@ public sealed class ImageField
     private int ImageCount(double period)
     {
         double decay = Magnets.IsLinear ? Math.PI / Magnets.PolePitch : Magnets.PolePairs / Magnets.Reach;
-        return (int)Math.Clamp(Math.Ceiling(DampingExponent / (decay * period)), 1.0, ImageCap);
+        return (int)Math.Clamp(Math.Ceiling(_dampingExponent / (decay * period)), 1.0, ImageCap);
     }
 
     private void Add(double north, double south)
     {
         _sheets.Add((north, 1.0));
         _sheets.Add((south, -1.0));
+    }
+
+    /// <summary>Place of one magnet of the array.</summary>
+    [StructLayout(LayoutKind.Auto)]
+    private readonly record struct Pole
+    {
+        /// <summary>Cosine of its angle.</summary>
+        public required double Cosine { get; init; }
+
+        /// <summary>Sine of its angle.</summary>
+        public required double Sine { get; init; }
+
+        /// <summary>Its shift along a row [m].</summary>
+        public required double Shift { get; init; }
+
+        /// <summary>Its sign times the summation weight.</summary>
+        public required double Weight { get; init; }
+
+        /// <summary>Magnet 0 or a direct neighbour.</summary>
+        public required bool IsNeighbour { get; init; }
+
+        /// <summary>Turns a position into the magnet's frame.</summary>
+        /// <param name="x">Position along x [m].</param>
+        /// <param name="y">Position along y [m].</param>
+        /// <returns>The position there.</returns>
+        public (double X, double Y) Enter(double x, double y) => ((x * Cosine) + (y * Sine), (y * Cosine) - (x * Sine) - Shift);
+
+        /// <summary>Turns a vector back from the magnet's frame.</summary>
+        /// <param name="x">Component along x.</param>
+        /// <param name="y">Component along y.</param>
+        /// <returns>The components in the common frame.</returns>
+        public (double X, double Y) Leave(double x, double y) => ((x * Cosine) - (y * Sine), (y * Cosine) + (x * Sine));
     }
 }

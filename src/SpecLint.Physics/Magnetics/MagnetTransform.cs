@@ -11,7 +11,12 @@ namespace SpecLint.Physics.Magnetics;
 public sealed class MagnetTransform
 {
     private const int Nodes = WaveNumberGrid.NodesPerBlock;
+
+    /// <summary>Number of radii at which fields inside the magnet are tabulated.</summary>
+    internal const int InteriorNodes = 8;
+
     private readonly List<List<double[]>> _blocks = [];
+    private readonly List<double[]> _interior = [];
 
     /// <summary>Prepares the spectrum of a magnet array.</summary>
     /// <param name="geometry">The magnets; their <see cref="MagnetGeometry.DomainFault"/> must be null.</param>
@@ -71,6 +76,50 @@ public sealed class MagnetTransform
         }
 
         return lines[index];
+    }
+
+    /// <summary>Radii (linear: distances across the travel) at which the coil's field inside the magnet is tabulated [m].</summary>
+    /// <returns>Chebyshev nodes over the magnet, ascending.</returns>
+    internal double[] InteriorRadii()
+    {
+        double inner = Geometry.IsLinear ? 0.0 : Geometry.Shape == MagnetShape.Sector ? Geometry.InnerRadius : Geometry.PitchRadius - (0.5 * Geometry.Length);
+        double outer = Geometry.Reach;
+        double[] radii = new double[InteriorNodes];
+        for (int i = 0; i < InteriorNodes; i++)
+        {
+            radii[i] = (0.5 * (inner + outer)) - (0.5 * (outer - inner) * Math.Cos(Math.PI * (i + 0.5) / InteriorNodes));
+        }
+
+        return radii;
+    }
+
+    /// <summary>J_p(k r), or cos(ky y), at the interior radii over one block.</summary>
+    /// <param name="block">Block number.</param>
+    /// <returns>Radius by radius, node by node.</returns>
+    internal ReadOnlySpan<double> InteriorHarmonics(int block)
+    {
+        while (_interior.Count <= block)
+        {
+            double[] radii = InteriorRadii();
+            double[] all = new double[InteriorNodes * Nodes];
+            PhaseTable table = new(Grid, _interior.Count);
+            for (int i = 0; i < InteriorNodes; i++)
+            {
+                Span<double> line = all.AsSpan(i * Nodes, Nodes);
+                if (Grid.IsLinear)
+                {
+                    table.Fill(radii[i], line, table.Line(0));
+                }
+                else
+                {
+                    AngularProjection.Project(RoundTransform.Point(radii[i]), Grid.PolePairs, 1, table).CopyTo(line);
+                }
+            }
+
+            _interior.Add(all);
+        }
+
+        return _interior[block];
     }
 
     private double[] LinearLine(int block, int index)

@@ -9,7 +9,6 @@ namespace SpecLint.Physics.Magnetics;
 /// <seealso>Van Oosterom A., Strackee J., The solid angle of a plane triangle, IEEE Trans. Biomed. Eng. 30(2), 1983, 125-126.</seealso>
 internal sealed class PolygonSheet : IChargeSheet
 {
-    private const double DegreesPerSegment = 2.5;
     private readonly double[] _x;
     private readonly double[] _y;
 
@@ -32,14 +31,14 @@ internal sealed class PolygonSheet : IChargeSheet
         return new PolygonSheet([a, b, b, a], [-w, -w, w, w]);
     }
 
-    /// <summary>An annular sector, its arcs drawn as chords of 2.5 degrees at most that keep the area.</summary>
-    /// <param name="inner">Inner radius [m].</param>
-    /// <param name="outer">Outer radius [m].</param>
-    /// <param name="halfAngle">Half the angle seen from the axis [rad].</param>
+    /// <summary>An annular sector, its arcs drawn as chords that keep the area.</summary>
+    /// <param name="magnets">Sector magnets.</param>
+    /// <param name="chordDegrees">Largest angle of one chord [degree].</param>
     /// <returns>The sheet.</returns>
-    public static PolygonSheet Sector(double inner, double outer, double halfAngle)
+    public static PolygonSheet Sector(in MagnetGeometry magnets, double chordDegrees)
     {
-        int segments = (int)Math.Ceiling(2.0 * halfAngle * 180.0 / (Math.PI * DegreesPerSegment));
+        (double inner, double outer, double halfAngle) = (magnets.InnerRadius, magnets.OuterRadius, magnets.SectorHalfAngle);
+        int segments = (int)Math.Ceiling(2.0 * halfAngle * 180.0 / (Math.PI * chordDegrees));
         double step = 2.0 * halfAngle / segments;
         double swell = Math.Sqrt(step / Math.Sin(step));
         double[] x = new double[2 * (segments + 1)];
