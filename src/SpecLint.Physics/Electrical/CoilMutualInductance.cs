@@ -9,28 +9,32 @@ namespace SpecLint.Physics.Electrical;
 /// <remarks>
 /// M = mu0 N²/(2 pi) times the integral of k C(k) G(k), C the direction mean of the product of both coils' transforms.
 /// A coil turned about the shaft has the same transform, turned; so one sampling of directions serves all separations. A coil
-/// moved by d multiplies by exp(-j k.d). Short waves cancel between coils apart, so the integral ends early.
+/// moved by d multiplies by exp(-j k.d). Short waves cancel between coils apart, so the integral ends early. Separations beyond 20 pitches
+/// are left at zero: as dipoles they are about 1e-5 of the self inductance.
 /// </remarks>
 /// <seealso>W.G. Hurley, M.C. Duffy, IEEE Trans. Magn. 31(4), 1995, 2416-2422; rotation and shift theorems of the Fourier transform.</seealso>
 public static class CoilMutualInductance
 {
-    private const double RelativeTolerance = 2e-5;
+    private const double RelativeTolerance = 5e-5;
     private const int LeastPanels = 4;
-    private const int MostPanels = 2000;
+    private const int MostPanels = 240;
+    private const int MostCoils = 720;
+    private const int FarthestSeparation = 20;
 
     /// <summary>All inductances of coils equally spaced round the shaft.</summary>
     /// <param name="coil">Buildable outline with a pitch radius > 0.</param>
     /// <param name="turns">Turns of one coil, > 0.</param>
     /// <param name="planes">Iron planes beside the winding.</param>
     /// <param name="coils">Number of coils, >= 1.</param>
-    /// <returns>Self inductance and mutuals by separation; NaN throughout if the coil is not buildable.</returns>
+    /// <returns>Self inductance and mutuals by separation; NaN if the coil is not buildable or there are more than 720.</returns>
     public static CoilInductances Ring(in CoilOutline coil, double turns, IronPlanes planes, int coils)
     {
         ArgumentOutOfRangeException.ThrowIfNegativeOrZero(coils);
         Span<double> integrals = new double[coils / 2 + 1];
+        Span<double> near = integrals[..Math.Min(integrals.Length, FarthestSeparation + 1)];
         double scale = CoilSelfInductance.Mu0 * turns * turns / (2.0 * Math.PI);
         InductanceEstimate self = CoilSelfInductance.Of(coil, turns, planes);
-        if (!double.IsFinite(self.Value) || coils == 1)
+        if (!double.IsFinite(self.Value) || coils > MostCoils)
         {
             integrals.Fill(double.NaN);
         }
@@ -42,11 +46,11 @@ public static class CoilMutualInductance
                 distances[separation] = 2.0 * coil.PitchRadius * Math.Sin(Math.PI * separation / coils);
             }
 
-            Rings(coil, planes, distances, self.Value / scale, integrals);
+            Rings(coil, planes, distances[..near.Length], self.Value / scale, near);
         }
         else
         {
-            Turned(coil, planes, coils, self.Value / scale, integrals);
+            Turned(coil, planes, coils, self.Value / scale, near);
         }
 
         return Collect(CoilArrangement.Ring, coils, self, integrals, scale);
@@ -57,11 +61,12 @@ public static class CoilMutualInductance
     /// <param name="turns">Turns of one coil, > 0.</param>
     /// <param name="planes">Iron planes beside the winding.</param>
     /// <param name="row">Number and pitch of the coils.</param>
-    /// <returns>Self inductance and mutuals by separation.</returns>
+    /// <returns>Self inductance and mutuals by separation; NaN if the coil is not buildable or there are more than 720.</returns>
     public static CoilInductances Row(in CoilOutline coil, double turns, IronPlanes planes, CoilRow row)
     {
         ArgumentOutOfRangeException.ThrowIfNegativeOrZero(row.Coils, nameof(row));
         Span<double> integrals = new double[row.Coils];
+        Span<double> near = integrals[..Math.Min(integrals.Length, FarthestSeparation + 1)];
         Span<double> distances = new double[row.Coils];
         for (int separation = 0; separation < row.Coils; separation++)
         {
@@ -70,17 +75,17 @@ public static class CoilMutualInductance
 
         double scale = CoilSelfInductance.Mu0 * turns * turns / (2.0 * Math.PI);
         InductanceEstimate self = CoilSelfInductance.Of(coil, turns, planes);
-        if (!double.IsFinite(self.Value))
+        if (!double.IsFinite(self.Value) || row.Coils > MostCoils)
         {
             integrals.Fill(double.NaN);
         }
         else if (coil.Shape == CoilShape.Round)
         {
-            Rings(coil, planes, distances, self.Value / scale, integrals);
+            Rings(coil, planes, distances[..near.Length], self.Value / scale, near);
         }
         else
         {
-            Shifted(coil, planes, distances, self.Value / scale, integrals);
+            Shifted(coil, planes, distances[..near.Length], self.Value / scale, near);
         }
 
         return Collect(CoilArrangement.Row, row.Coils, self, integrals, scale);
@@ -107,19 +112,21 @@ public static class CoilMutualInductance
     private static void Turned(in CoilOutline coil, IronPlanes planes, int coils, double self, Span<double> integrals)
     {
         var transform = new TurnDensityTransform(coil, 0.0);
-        int multiple = coils % 4 == 0 ? coils : coils % 2 == 0 ? 2 * coils : 4 * coils;
-        double half = 0.5 * Math.PI / transform.Reach;
+        int multiple = coils % 2 == 0 ? coils : 2 * coils;
+        double own = new TurnDensityTransform(coil, coil.PitchRadius).Reach;
+        double reach = own + coil.PitchRadius * Math.Sin(Math.PI * (integrals.Length - 1) / coils);
+        double half = 0.5 * Math.PI / reach;
         Complex[] samples = [];
-        Span<double> part = stackalloc double[Math.Min(integrals.Length, 256)];
-        part = integrals.Length > part.Length ? new double[integrals.Length] : part;
-        var settling = new Settling(self);
+        Span<double> part = stackalloc double[FarthestSeparation + 1];
+        part = part[..integrals.Length];
+        var settling = new Settling(self * own / reach);
         for (int panel = 0; panel < MostPanels; panel++)
         {
             part.Clear();
             for (int node = 0; node < GaussPanel.Count; node++)
             {
                 double k = half * (2 * panel + 1 + GaussPanel.Nodes[node]);
-                int directions = multiple * (1 + (int)((2.0 * k * transform.Reach + 16.0) / multiple));
+                int directions = multiple * (1 + (int)((2.0 * k * reach + 16.0) / multiple));
                 if (samples.Length < directions)
                 {
                     samples = new Complex[2 * directions];
@@ -138,8 +145,6 @@ public static class CoilMutualInductance
                 return;
             }
         }
-
-        integrals.Fill(double.NaN);
     }
 
     // Directions 2 pi i/n: the coil is symmetric about its axis, so a quarter of them gives all.
@@ -158,17 +163,23 @@ public static class CoilMutualInductance
         }
     }
 
+    // Mean over directions of one coil's transform and that of the coil turned by so many samples.
     private static double Correlation(ReadOnlySpan<Complex> samples, int shift)
     {
-        double sum = 0.0;
-        for (int index = 0; index < samples.Length; index++)
+        return Product(samples[shift..], samples[..^shift]) + Product(samples[..shift], samples[^shift..]);
+    }
+
+    private static double Product(ReadOnlySpan<Complex> first, ReadOnlySpan<Complex> second)
+    {
+        double real = 0.0;
+        double imaginary = 0.0;
+        for (int index = 0; index < first.Length && index < second.Length; index++)
         {
-            Complex first = samples[index];
-            Complex second = samples[index >= shift ? index - shift : index - shift + samples.Length];
-            sum += first.Real * second.Real + first.Imaginary * second.Imaginary;
+            real += first[index].Real * second[index].Real;
+            imaginary += first[index].Imaginary * second[index].Imaginary;
         }
 
-        return sum;
+        return real + imaginary;
     }
 
     private static void Shifted(in CoilOutline coil, IronPlanes planes, ReadOnlySpan<double> distances, double self, Span<double> integrals)
@@ -176,8 +187,9 @@ public static class CoilMutualInductance
         var transform = new TurnDensityTransform(coil, coil.PitchRadius);
         double reach = transform.Reach + 0.5 * distances[^1];
         double half = 0.5 * Math.PI / reach;
-        Span<double> part = new double[integrals.Length];
-        var settling = new Settling(self);
+        Span<double> part = stackalloc double[FarthestSeparation + 1];
+        part = part[..integrals.Length];
+        var settling = new Settling(self * transform.Reach / reach);
         for (int panel = 0; panel < MostPanels; panel++)
         {
             part.Clear();
@@ -203,16 +215,16 @@ public static class CoilMutualInductance
                 return;
             }
         }
-
-        integrals.Fill(double.NaN);
     }
 
     private static void Rings(in CoilOutline coil, IronPlanes planes, ReadOnlySpan<double> distances, double self, Span<double> integrals)
     {
         var transform = new RingTransform(coil);
-        double half = 0.5 * Math.PI / (transform.Reach + 0.5 * distances[^1]);
-        Span<double> part = new double[integrals.Length];
-        var settling = new Settling(self);
+        double reach = transform.Reach + 0.5 * distances[^1];
+        double half = 0.5 * Math.PI / reach;
+        Span<double> part = stackalloc double[FarthestSeparation + 1];
+        part = part[..integrals.Length];
+        var settling = new Settling(self * transform.Reach / reach);
         for (int panel = 0; panel < MostPanels; panel++)
         {
             part.Clear();
@@ -232,12 +244,10 @@ public static class CoilMutualInductance
                 return;
             }
         }
-
-        integrals.Fill(double.NaN);
     }
 
-    // The mutuals have settled when two panels running add less than the tolerance of the self inductance to any of them.
-    private sealed class Settling(double self)
+    // Settled when two panels running, brought to the width that suits one coil, add less than the tolerance of the self inductance.
+    private sealed class Settling(double scale)
     {
         private double _before = double.PositiveInfinity;
 
@@ -250,7 +260,7 @@ public static class CoilMutualInductance
                 largest = Math.Max(largest, Math.Abs(part[separation]));
             }
 
-            bool settled = panel >= LeastPanels && Math.Max(largest, _before) < RelativeTolerance * self;
+            bool settled = panel >= LeastPanels && Math.Max(largest, _before) < RelativeTolerance * scale;
             _before = largest;
             return settled;
         }

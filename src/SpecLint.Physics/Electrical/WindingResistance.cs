@@ -20,11 +20,16 @@ public static class WindingResistance
     public static double OfPhase(double coilResistance, int seriesCoils, int parallelPaths) =>
         coilResistance * seriesCoils / parallelPaths;
 
+    /// <summary>Conductor volume of one coil, bare metal.</summary>
+    /// <param name="wire">Wire.</param>
+    /// <returns>[m³].</returns>
+    public static double CoilVolume(in WindingWire wire) => wire.TurnSection * wire.Turns * wire.MeanTurnLength;
+
     /// <summary>Conductor mass of one coil, bare metal.</summary>
     /// <param name="wire">Wire.</param>
     /// <returns>[kg].</returns>
     public static double CoilMass(in WindingWire wire) =>
-        wire.Material.Density * wire.TurnSection * wire.Turns * wire.MeanTurnLength;
+        wire.Material.Density * CoilVolume(wire);
 
     /// <summary>Current density in a strand.</summary>
     /// <param name="phaseRms">Phase current [A].</param>

@@ -4,25 +4,33 @@ namespace SpecLint.Physics.Windings;
 internal static class EqualCoilCounts
 {
     private const double LeastGain = 1e-9;
+    private const int MostProjections = 100_000;
+    private const int MostSweeps = 100;
 
     /// <summary>Reassigns coils, in place, if the phases hold unequal numbers and the coils can be shared out evenly.</summary>
     /// <remarks>
-    /// Coils of over-full phases go one at a time where the projection on the phase axes loses least; pairs are then exchanged while
-    /// the sum of projections rises. The gain threshold bounds the number of exchanges. The result is a local best.
+    /// Coils of over-full phases go one at a time where the projection on the phase axes loses least; pairs are then exchanged
+    /// in sweeps while the sum of projections rises. The result is a local best. Above 100 000 projections nothing is done.
     /// </remarks>
     public static void Reassign(ReadOnlySpan<double> angles, int polePairs, int phases, Span<int> phaseOf, Span<int> senseOf)
     {
         int share = angles.Length / phases;
-        if (angles.Length % phases != 0 || HasEqualCounts(phases, phaseOf, share))
+        if (angles.Length % phases != 0 || (long)angles.Length * phases > MostProjections || HasEqualCounts(phases, phaseOf, share))
         {
             return;
         }
 
-        while (MoveOne(angles, polePairs, phases, phaseOf))
+        double[] sizes = new double[angles.Length * phases];
+        for (int coil = 0; coil < angles.Length; coil++)
         {
+            for (int phase = 0; phase < phases; phase++)
+            {
+                sizes[coil * phases + phase] = Math.Abs(Projection(angles[coil], polePairs, phase, phases));
+            }
         }
 
-        while (ExchangeOne(angles, polePairs, phases, phaseOf))
+        LevelCounts(sizes, phases, share, phaseOf);
+        for (int sweep = 0; sweep < MostSweeps && ExchangeSweep(sizes, phases, phaseOf); sweep++)
         {
         }
 
@@ -45,57 +53,67 @@ internal static class EqualCoilCounts
         return true;
     }
 
-    private static bool MoveOne(ReadOnlySpan<double> angles, int polePairs, int phases, Span<int> phaseOf)
+    private static void LevelCounts(ReadOnlySpan<double> sizes, int phases, int share, Span<int> phaseOf)
     {
-        int share = angles.Length / phases;
-        double best = double.NegativeInfinity;
-        int bestCoil = -1;
-        int bestPhase = -1;
-        for (int coil = 0; coil < angles.Length; coil++)
+        int[] counts = new int[phases];
+        foreach (int phase in phaseOf)
         {
-            if (phaseOf.Count(phaseOf[coil]) <= share)
+            counts[phase]++;
+        }
+
+        while (true)
+        {
+            (int coil, int target) = CheapestMove(sizes, counts, share, phaseOf);
+            if (coil < 0)
             {
-                continue;
+                return;
             }
 
-            for (int phase = 0; phase < phases; phase++)
+            counts[phaseOf[coil]]--;
+            counts[target]++;
+            phaseOf[coil] = target;
+        }
+    }
+
+    private static (int Coil, int Target) CheapestMove(ReadOnlySpan<double> sizes, ReadOnlySpan<int> counts, int share, ReadOnlySpan<int> phaseOf)
+    {
+        double best = double.NegativeInfinity;
+        (int Coil, int Target) move = (-1, -1);
+        for (int coil = 0; coil < phaseOf.Length; coil++)
+        {
+            ReadOnlySpan<double> own = sizes.Slice(coil * counts.Length, counts.Length);
+            for (int phase = 0; phase < counts.Length && counts[phaseOf[coil]] > share; phase++)
             {
-                double gain = Size(angles[coil], polePairs, phase, phases) - Size(angles[coil], polePairs, phaseOf[coil], phases);
-                if (phaseOf.Count(phase) < share && gain > best + LeastGain)
+                double gain = own[phase] - own[phaseOf[coil]];
+                if (counts[phase] < share && gain > best + LeastGain)
                 {
-                    (best, bestCoil, bestPhase) = (gain, coil, phase);
+                    (best, move) = (gain, (coil, phase));
                 }
             }
         }
 
-        if (bestCoil >= 0)
-        {
-            phaseOf[bestCoil] = bestPhase;
-        }
-
-        return bestCoil >= 0;
+        return move;
     }
 
-    private static bool ExchangeOne(ReadOnlySpan<double> angles, int polePairs, int phases, Span<int> phaseOf)
+    private static bool ExchangeSweep(ReadOnlySpan<double> sizes, int phases, Span<int> phaseOf)
     {
-        for (int first = 0; first < angles.Length; first++)
+        bool exchanged = false;
+        for (int first = 0; first < phaseOf.Length; first++)
         {
-            for (int second = first + 1; second < angles.Length; second++)
+            for (int second = first + 1; second < phaseOf.Length; second++)
             {
-                double now = Size(angles[first], polePairs, phaseOf[first], phases) + Size(angles[second], polePairs, phaseOf[second], phases);
-                double then = Size(angles[first], polePairs, phaseOf[second], phases) + Size(angles[second], polePairs, phaseOf[first], phases);
+                double now = sizes[first * phases + phaseOf[first]] + sizes[second * phases + phaseOf[second]];
+                double then = sizes[first * phases + phaseOf[second]] + sizes[second * phases + phaseOf[first]];
                 if (then > now + LeastGain)
                 {
                     (phaseOf[first], phaseOf[second]) = (phaseOf[second], phaseOf[first]);
-                    return true;
+                    exchanged = true;
                 }
             }
         }
 
-        return false;
+        return exchanged;
     }
-
-    private static double Size(double angle, int polePairs, int phase, int phases) => Math.Abs(Projection(angle, polePairs, phase, phases));
 
     private static double Projection(double angle, int polePairs, int phase, int phases) =>
         Math.Cos(polePairs * angle - StarOfSlots.PhaseAngle(phase, phases));
