@@ -20,8 +20,10 @@ internal sealed class SchemaFaults(TokenTree tree)
         {
             if (error.Kind == ValidationErrorKind.PropertyRequired)
             {
-                var parent = tree.OriginOf(error.Token);
-                missing.Add((parent?.Key ?? "", error.Property ?? "", parent?.KeyRegion ?? Region.Beginning));
+                if (tree.OriginOf(error.Token) is { Node: YamlMapping } parent)
+                {
+                    missing.Add((parent.Key, error.Property ?? "", parent.KeyRegion));
+                }
             }
             else if (error.Kind == ValidationErrorKind.NoAdditionalPropertiesAllowed)
             {
