@@ -135,10 +135,10 @@ public static class JsonSummary
         }
 
         DisplayUnit unit = DisplayUnit.Of(finding.DisplayUnit, finding.Dimension);
-        JsonOutput.WriteOptional(json, "value", finding.Value is { } value ? QuantityText.Rounded(unit.FromSi(value)) : null);
-        JsonOutput.WriteOptional(json, "bound", finding.Limit is { } limit ? QuantityText.Rounded(unit.FromSi(limit)) : null);
-        JsonOutput.WriteOptional(json, "uncertainty", finding.Uncertainty is { } band ? QuantityText.Rounded(unit.DifferenceFromSi(band)) : null);
-        JsonOutput.WriteOptional(json, "margin", finding.Margin is { } margin ? QuantityText.Rounded(margin) : null);
+        JsonOutput.WriteOptional(json, "value", finding.Value is { } value ? BandText.Rounded(unit.FromSi(value)) : null);
+        JsonOutput.WriteOptional(json, "bound", finding.Limit is { } limit ? BandText.Rounded(unit.FromSi(limit)) : null);
+        JsonOutput.WriteOptional(json, "uncertainty", finding.Uncertainty is { } band ? BandText.Rounded(unit.DifferenceFromSi(band)) : null);
+        JsonOutput.WriteOptional(json, "margin", finding.Margin is { } margin ? BandText.Rounded(margin) : null);
         json.WriteString("unit", unit.Symbol.Length == 0 ? "1" : unit.Symbol);
     }
 

@@ -71,15 +71,15 @@ public static class WorkingListing
         }
 
         DisplayUnit unit = DisplayUnit.Of(figure.Definition.DisplayUnit, figure.Definition.Dimension);
-        string text = "± " + unit.Attach(QuantityText.Number(unit.DifferenceFromSi(figure.Outcome.Uncertainty), 2));
-        if (unit.Offset == 0 && figure.Outcome.Value != 0)
+        string text = "± " + unit.Attach(BandText.Number(unit.DifferenceFromSi(figure.Outcome.Uncertainty), 2));
+        if (!unit.HasOffset && figure.Outcome.Value != 0)
         {
             double share = 100 * figure.Outcome.Uncertainty / Math.Abs(figure.Outcome.Value);
-            text += string.Create(CultureInfo.InvariantCulture, $", {QuantityText.Number(share, 2)} % of the value");
+            text += string.Create(CultureInfo.InvariantCulture, $", {BandText.Number(share, 2)} % of the value");
         }
 
         return text
-            + (figure.Definition.MethodUncertainty > 0 ? $"; the method adds {QuantityText.Number(100 * figure.Definition.MethodUncertainty, 2)} %" : "")
+            + (figure.Definition.MethodUncertainty > 0 ? $"; the method adds {BandText.Number(100 * figure.Definition.MethodUncertainty, 2)} %" : "")
             + (figure.Definition.IsCoarse ? "; a coarse estimate" : "");
     }
 

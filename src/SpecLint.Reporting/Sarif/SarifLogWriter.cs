@@ -38,7 +38,7 @@ public static class SarifLogWriter
         writer.NewLine = "\n";
         using (var json = new JsonTextWriter(writer) { Formatting = Formatting.Indented, Culture = CultureInfo.InvariantCulture, CloseOutput = false })
         {
-            var serializer = JsonSerializer.Create(new JsonSerializerSettings { Culture = CultureInfo.InvariantCulture });
+            var serializer = JsonSerializer.Create(new JsonSerializerSettings { Culture = CultureInfo.InvariantCulture, ContractResolver = new SarifContract() });
             serializer.Serialize(json, Log(reviews, options));
         }
 

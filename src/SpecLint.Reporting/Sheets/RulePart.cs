@@ -47,6 +47,6 @@ internal static class RulePart
         }
 
         string measured = ReviewWords.Measured(finding);
-        return $": margin {QuantityText.Margin(margin)}" + (measured.Length > 0 ? $" ({measured})" : "");
+        return $": margin {BandText.Margin(margin)}" + (measured.Length > 0 ? $" ({measured})" : "");
     }
 }

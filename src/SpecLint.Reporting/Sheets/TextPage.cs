@@ -156,7 +156,7 @@ internal sealed class TextPage
     private static bool IsUnit(string word)
     {
         string bare = word.TrimEnd('.', ',', ';', ':', ')');
-        return Quantities.DisplayUnit.IsKnown(bare);
+        return bare is "±" || Spec.Units.UnitTable.TryFind(bare, out _);
     }
 
     private string Emphasise(string text, Emphasis emphasis)
