@@ -11,6 +11,8 @@ internal sealed class SarifPlaces
 {
     private const int MostContextLines = 10;
 
+    private static readonly string[] LineEnds = ["\r\n", "\n", "\r"];
+
     private readonly SpecDocument _spec;
     private readonly Uri _uri;
     private readonly int _artifactIndex;
@@ -25,7 +27,7 @@ internal sealed class SarifPlaces
         _spec = spec;
         _uri = new Uri(RelativePath.Escape(relativePath), UriKind.Relative);
         _artifactIndex = artifactIndex;
-        _lines = spec.Text.ReplaceLineEndings("\n").Split('\n');
+        _lines = spec.Text.Split(LineEnds, StringSplitOptions.None);
     }
 
     /// <summary>The spec as an artifact of the run.</summary>

@@ -68,7 +68,7 @@ internal sealed class SarifResults
         var result = new Result
         {
             RuleId = finding.Rule.Id,
-            RuleIndex = _rules.IndexOf(finding.Rule.Id),
+            RuleIndex = _rules.IndexOf(finding.Rule),
             Level = isUnmet ? SarifRules.LevelOf(finding.Grade) : FailureLevel.None,
             Message = SarifText.Message(finding.Message.Length > 0 ? finding.Message : finding.Rule.Title),
             Locations = [_places.LocationWithContext(finding.Region, finding.Key)],

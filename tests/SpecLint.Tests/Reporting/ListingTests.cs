@@ -68,8 +68,8 @@ public sealed class ListingTests
     [Fact]
     public void WorkingListing_Text_ShowsEachInputsLine()
     {
-        string text = Text(w => WorkingListing.WriteText(Graph, "gap.magnetic", new WorkingOptions(), w));
-        Assert.Contains("winding.coil.thickness = 13 mm ± 0.2 mm (specs/wind.yaml, line 16)", text, StringComparison.Ordinal);
+        string text = Text(w => WorkingListing.WriteText(Graph, "gap.magnetic", new WorkingOptions { Layout = new SheetOptions { Width = 100 } }, w));
+        Assert.Contains("winding.coil.thickness = 13 mm ± 0.2 mm   (specs/wind.yaml, line 16)", text, StringComparison.Ordinal);
         Assert.Contains("13 mm + 2 · 1.5 mm", text, StringComparison.Ordinal);
     }
 
