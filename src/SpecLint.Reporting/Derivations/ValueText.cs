@@ -13,13 +13,13 @@ internal static class ValueText
     public static string Of(SpecValue value) =>
         value.Kind == SpecValueKind.List ? FormattableString.Invariant($"a list of {value.Count}")
         : value.Text.Length > 0 ? Printable.Line(value.Text)
-        : QuantityText.Value(value.Number, value.UnitText, value.Dimension);
+        : BandText.Value(value.Number, value.UnitText, value.Dimension);
 
     /// <summary>A figure's value with its band, or why there is none.</summary>
     /// <param name="figure">The figure.</param>
     public static string Of(Figure figure) => figure.Outcome.Kind switch
     {
-        OutcomeKind.Value => QuantityText.Band(
+        OutcomeKind.Value => BandText.Band(
             figure.Outcome.Value, figure.Outcome.Uncertainty, figure.Definition.DisplayUnit, figure.Definition.Dimension),
         _ => Lack(figure.Outcome),
     };
@@ -36,13 +36,13 @@ internal static class ValueText
     /// <summary>A figure's value for a formula, without its band.</summary>
     /// <param name="figure">The figure.</param>
     public static string Bare(Figure figure) => figure.Outcome.HasValue
-        ? QuantityText.Value(figure.Outcome.Value, figure.Definition.DisplayUnit, figure.Definition.Dimension)
+        ? BandText.Value(figure.Outcome.Value, figure.Definition.DisplayUnit, figure.Definition.Dimension)
         : "(no value)";
 
     /// <summary>A value of a spec for a formula, without its tolerance.</summary>
     /// <param name="value">The leaf; null when not stated.</param>
     public static string Bare(SpecValue? value) =>
         value is null ? "(not stated)"
-        : value is { Kind: SpecValueKind.Number, HasTolerance: true } ? QuantityText.Value(value.Number, value.UnitText, value.Dimension)
+        : value is { Kind: SpecValueKind.Number, HasTolerance: true } ? BandText.Value(value.Number, value.UnitText, value.Dimension)
         : Of(value);
 }

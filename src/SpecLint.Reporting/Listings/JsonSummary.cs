@@ -16,10 +16,10 @@ public static class JsonSummary
     /// Writes the document; the stream stays open. A finding's <c>value</c>, <c>bound</c> and <c>uncertainty</c> are told in
     /// its <c>unit</c>, which is the one people read; figures in SI come from <see cref="FigureListing"/>.
     /// </summary>
-    /// <param name="reviews">The reviews in order.</param>
+    /// <param name="reviews">The reviews in order; each is let go of once it is written.</param>
     /// <param name="options">Whether rules that are met and not applicable are listed too.</param>
     /// <param name="stream">Where to.</param>
-    public static void Write(IReadOnlyList<MachineReview> reviews, SheetOptions options, Stream stream)
+    public static void Write(IEnumerable<MachineReview> reviews, SheetOptions options, Stream stream)
     {
         ArgumentNullException.ThrowIfNull(reviews);
         ArgumentNullException.ThrowIfNull(options);
@@ -135,10 +135,10 @@ public static class JsonSummary
         }
 
         DisplayUnit unit = DisplayUnit.Of(finding.DisplayUnit, finding.Dimension);
-        JsonOutput.WriteOptional(json, "value", finding.Value is { } value ? QuantityText.Rounded(unit.FromSi(value)) : null);
-        JsonOutput.WriteOptional(json, "bound", finding.Limit is { } limit ? QuantityText.Rounded(unit.FromSi(limit)) : null);
-        JsonOutput.WriteOptional(json, "uncertainty", finding.Uncertainty is { } band ? QuantityText.Rounded(unit.DifferenceFromSi(band)) : null);
-        JsonOutput.WriteOptional(json, "margin", finding.Margin is { } margin ? QuantityText.Rounded(margin) : null);
+        JsonOutput.WriteOptional(json, "value", finding.Value is { } value ? BandText.Rounded(unit.FromSi(value)) : null);
+        JsonOutput.WriteOptional(json, "bound", finding.Limit is { } limit ? BandText.Rounded(unit.FromSi(limit)) : null);
+        JsonOutput.WriteOptional(json, "uncertainty", finding.Uncertainty is { } band ? BandText.Rounded(unit.DifferenceFromSi(band)) : null);
+        JsonOutput.WriteOptional(json, "margin", finding.Margin is { } margin ? BandText.Rounded(margin) : null);
         json.WriteString("unit", unit.Symbol.Length == 0 ? "1" : unit.Symbol);
     }
 

@@ -11,6 +11,7 @@ namespace SpecLint.Reporting.Listings;
 public static class WorkingListing
 {
     private const int LabelColumns = 13;
+    private const int Gap = 3;
 
     /// <summary>Writes the working for people.</summary>
     /// <param name="graph">The machine.</param>
@@ -71,15 +72,15 @@ public static class WorkingListing
         }
 
         DisplayUnit unit = DisplayUnit.Of(figure.Definition.DisplayUnit, figure.Definition.Dimension);
-        string text = "± " + unit.Attach(QuantityText.Number(unit.DifferenceFromSi(figure.Outcome.Uncertainty), 2));
-        if (unit.Offset == 0 && figure.Outcome.Value != 0)
+        string text = "± " + unit.Attach(BandText.Number(unit.DifferenceFromSi(figure.Outcome.Uncertainty), 2));
+        if (!unit.HasOffset && figure.Outcome.Value != 0)
         {
             double share = 100 * figure.Outcome.Uncertainty / Math.Abs(figure.Outcome.Value);
-            text += string.Create(CultureInfo.InvariantCulture, $", {QuantityText.Number(share, 2)} % of the value");
+            text += string.Create(CultureInfo.InvariantCulture, $", {BandText.Number(share, 2)} % of the value");
         }
 
         return text
-            + (figure.Definition.MethodUncertainty > 0 ? $"; the method adds {QuantityText.Number(100 * figure.Definition.MethodUncertainty, 2)} %" : "")
+            + (figure.Definition.MethodUncertainty > 0 ? $"; the method adds {BandText.Number(100 * figure.Definition.MethodUncertainty, 2)} %" : "")
             + (figure.Definition.IsCoarse ? "; a coarse estimate" : "");
     }
 
@@ -101,13 +102,7 @@ public static class WorkingListing
             Labelled(page, "with values", step.Substituted);
         }
 
-        string label = "from";
-        foreach (DerivationStep input in section.Inputs)
-        {
-            Labelled(page, label, InputText(graph, input, unfolded));
-            label = "";
-        }
-
+        WriteInputs(page, graph, section, unfolded);
         Labelled(page, "basis", Printable.Line(RuleText.BasisWords(definition.Basis)));
         string uncertainty = Uncertainty(step.Figure);
         if (uncertainty.Length > 0)
@@ -116,19 +111,43 @@ public static class WorkingListing
         }
     }
 
-    private static string InputText(FigureGraph graph, DerivationStep input, HashSet<string> unfolded)
+    private static void WriteInputs(TextPage page, FigureGraph graph, WorkingSection section, HashSet<string> unfolded)
     {
-        string lead = input.Depth > 0 ? "· " : "";
-        string name = lead + Printable.Line(input.Name);
+        var rows = section.Inputs.Select(input => (Text: InputText(input), Place: PlaceText(graph, input, unfolded))).ToList();
+        int room = page.Width - LabelColumns - 2 - Gap - rows.Select(row => TextPage.Columns(row.Place)).DefaultIfEmpty().Max();
+        int column = rows.Where(row => row.Place.Length > 0).Select(row => TextPage.Columns(row.Text)).Where(c => c <= room).DefaultIfEmpty().Max();
+        string label = "from";
+        foreach (var (text, place) in rows)
+        {
+            if (place.Length > 0 && TextPage.Columns(text) <= column)
+            {
+                page.Columned("  " + TextPage.Pad(label, LabelColumns - 2) + "  ", TextPage.Pad(text, column + Gap) + place, Emphasis.Quiet);
+            }
+            else
+            {
+                Labelled(page, label, place.Length > 0 ? $"{text} {place}" : text);
+            }
+
+            label = "";
+        }
+    }
+
+    private static string InputText(DerivationStep input)
+    {
+        string name = (input.Depth > 0 ? "· " : "") + Printable.Line(input.Name);
         return input.Kind switch
         {
             FigureInputKind.Part => $"{name}, {input.Value}",
-            FigureInputKind.Key when input.Region is { } region => $"{name} = {input.Value} ({ReviewWords.Place(graph.Spec, region.StartLine)})",
-            FigureInputKind.Key => $"{name} ({input.Value})",
-            _ when !input.Figure!.Outcome.HasValue => $"{name} ({input.Value})",
-            _ => $"{name} = {input.Value}" + (unfolded.Contains(input.Name) ? " (below)" : ""),
+            FigureInputKind.Key when input.Region is null => $"{name} ({input.Value})",
+            FigureInputKind.Figure when !input.Figure!.Outcome.HasValue => $"{name} ({input.Value})",
+            _ => $"{name} = {input.Value}",
         };
     }
+
+    private static string PlaceText(FigureGraph graph, DerivationStep input, HashSet<string> unfolded) =>
+        input.Region is { } region ? $"({ReviewWords.Place(graph.Spec, region.StartLine)})"
+        : input.Kind == FigureInputKind.Figure && unfolded.Contains(input.Name) ? "(below)"
+        : "";
 
     private static void Labelled(TextPage page, string label, string text) =>
         page.Wrapped("  " + TextPage.Pad(label, LabelColumns - 2) + "  ", text, Emphasis.Quiet);

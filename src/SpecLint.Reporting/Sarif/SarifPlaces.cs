@@ -9,6 +9,10 @@ namespace SpecLint.Reporting.Sarif;
 /// <summary>Locations in one spec of the run.</summary>
 internal sealed class SarifPlaces
 {
+    private const int MostContextLines = 10;
+
+    private static readonly string[] LineEnds = ["\r\n", "\n", "\r"];
+
     private readonly SpecDocument _spec;
     private readonly Uri _uri;
     private readonly int _artifactIndex;
@@ -23,7 +27,7 @@ internal sealed class SarifPlaces
         _spec = spec;
         _uri = new Uri(RelativePath.Escape(relativePath), UriKind.Relative);
         _artifactIndex = artifactIndex;
-        _lines = spec.Text.ReplaceLineEndings("\n").Split('\n');
+        _lines = spec.Text.Split(LineEnds, StringSplitOptions.None);
     }
 
     /// <summary>The spec as an artifact of the run.</summary>
@@ -47,6 +51,27 @@ internal sealed class SarifPlaces
         },
         LogicalLocations = key.Length == 0 ? null : [Key(key)],
     };
+
+    /// <summary>A place of the spec with the key that stands there and the lines round it, for readers without the file.</summary>
+    /// <param name="region">The place.</param>
+    /// <param name="key">Dotted key; empty for the document.</param>
+    public Location LocationWithContext(TextRegion region, string key)
+    {
+        Location location = Location(region, key);
+        int first = Math.Max(1, region.StartLine - 1);
+        int last = Math.Min(_lines.Length, Math.Min(region.EndLine, region.StartLine + MostContextLines) + 1);
+        if (last > first)
+        {
+            location.PhysicalLocation.ContextRegion = new SarifRegion
+            {
+                StartLine = first,
+                EndLine = last,
+                Snippet = new ArtifactContent { Text = string.Join('\n', _lines[(first - 1)..last]) },
+            };
+        }
+
+        return location;
+    }
 
     /// <summary>A place of the spec at which a figure of the machine is told, since a figure has no line of its own.</summary>
     /// <param name="region">The place.</param>

@@ -68,10 +68,10 @@ internal sealed class SarifResults
         var result = new Result
         {
             RuleId = finding.Rule.Id,
-            RuleIndex = _rules.IndexOf(finding.Rule.Id),
+            RuleIndex = _rules.IndexOf(finding.Rule),
             Level = isUnmet ? SarifRules.LevelOf(finding.Grade) : FailureLevel.None,
             Message = SarifText.Message(finding.Message.Length > 0 ? finding.Message : finding.Rule.Title),
-            Locations = [_places.Location(finding.Region, finding.Key)],
+            Locations = [_places.LocationWithContext(finding.Region, finding.Key)],
             RelatedLocations = RelatedLocations(finding),
             CodeFlows = isUnmet ? SarifWorking.Flow(_review.Figures, finding, _places) : null,
             PartialFingerprints = fingerprints,
@@ -160,7 +160,7 @@ internal sealed class SarifResults
     {
         if (number is { } value && double.IsFinite(value))
         {
-            result.SetProperty(name, QuantityText.Rounded(convert(value)));
+            result.SetProperty(name, BandText.Rounded(convert(value)));
         }
     }
 }

@@ -1,6 +1,5 @@
 using Microsoft.CodeAnalysis.Sarif;
 using SpecLint.Review.Figures;
-using SpecLint.Review.Reviewing;
 using SpecLint.Review.Rules;
 using SpecLint.Reporting.Listings;
 using SpecLint.Reporting.Output;
@@ -13,31 +12,34 @@ internal sealed class SarifRules
     private readonly List<Rule> _rules = [];
     private readonly Dictionary<string, int> _index = new(StringComparer.Ordinal);
 
-    /// <summary>The rules loaded, and those that only findings name.</summary>
+    /// <summary>The rules loaded; others are added as findings name them.</summary>
     /// <param name="loaded">Every rule loaded.</param>
-    /// <param name="reviews">The reviews of the run.</param>
-    public SarifRules(IEnumerable<Rule> loaded, IEnumerable<MachineReview> reviews)
+    public SarifRules(IEnumerable<Rule> loaded)
     {
-        foreach (Rule rule in loaded.Concat(reviews.SelectMany(r => r.Findings).Select(f => f.Rule)))
+        foreach (Rule rule in loaded)
         {
-            if (_index.TryAdd(rule.Id, _rules.Count))
-            {
-                _rules.Add(rule);
-            }
+            IndexOf(rule);
         }
-
-        Standards = new SarifStandards(_rules);
     }
 
-    /// <summary>The standards they cite.</summary>
-    public SarifStandards Standards { get; }
+    /// <summary>The standards that the rules cite.</summary>
+    public SarifStandards Standards() => new(_rules);
 
-    /// <summary>Place of a rule in the driver's list.</summary>
-    /// <param name="id">Rule id.</param>
-    public int IndexOf(string id) => _index[id];
+    /// <summary>Place of a rule in the driver's list, to which it is added if need be.</summary>
+    /// <param name="rule">The rule.</param>
+    public int IndexOf(Rule rule)
+    {
+        if (_index.TryAdd(rule.Id, _rules.Count))
+        {
+            _rules.Add(rule);
+        }
+
+        return _index[rule.Id];
+    }
 
     /// <summary>The descriptors in order.</summary>
-    public IList<ReportingDescriptor> Descriptors() => [.. _rules.Select(Descriptor)];
+    /// <param name="standards">The standards that the rules cite.</param>
+    public IList<ReportingDescriptor> Descriptors(SarifStandards standards) => [.. _rules.Select(rule => Descriptor(rule, standards))];
 
     /// <summary>The SARIF level of a grade.</summary>
     /// <param name="grade">Grade of a rule or finding.</param>
@@ -48,7 +50,7 @@ internal sealed class SarifRules
         _ => FailureLevel.Note,
     };
 
-    private ReportingDescriptor Descriptor(Rule rule)
+    private static ReportingDescriptor Descriptor(Rule rule, SarifStandards standards)
     {
         string requirement = RuleText.Requirement(rule);
         var descriptor = new ReportingDescriptor
@@ -62,7 +64,7 @@ internal sealed class SarifRules
             {
                 Level = rule.Source == RuleSource.Hazard ? FailureLevel.None : LevelOf(rule.Grade),
             },
-            Relationships = Standards.RelationshipsOf(rule),
+            Relationships = standards.RelationshipsOf(rule),
         };
         descriptor.SetProperty("grade", RuleText.GradeWord(rule.Grade));
         if (rule.Beyond is { } beyond)

@@ -1,3 +1,4 @@
+using System.Text;
 using Microsoft.CodeAnalysis.Sarif;
 using SpecLint.Reporting.Output;
 
@@ -34,22 +35,27 @@ internal static class SarifText
     /// <param name="text">Any text.</param>
     public static MultiformatMessageString Description(string text) => new() { Text = Escape(text) };
 
-    /// <summary>A headline as one word in Pascal case, letters and digits only: <c>CoilHoleWiderThanTheMagnet</c>.</summary>
+    /// <summary>
+    /// A headline as one word of capitalised words, letters and digits only: <c>CoilHoleWiderThanTheMagnet</c>. Abbreviations are
+    /// written like words and single letters join what follows, so that every capital begins a word.
+    /// </summary>
     /// <param name="title">The headline.</param>
     public static string PascalCase(string title)
     {
-        var name = new System.Text.StringBuilder(title.Length);
-        bool starts = true;
+        var name = new StringBuilder(title.Length);
+        int length = 0;
         foreach (char c in title)
         {
-            if (!char.IsAsciiLetterOrDigit(c))
+            if (char.IsAsciiLetterOrDigit(c))
             {
-                starts = starts || c != '\'';
-                continue;
+                bool begins = length == 0 && (name.Length == 0 || char.IsAsciiLetterLower(name[^1]));
+                name.Append(begins ? char.ToUpperInvariant(c) : char.ToLowerInvariant(c));
+                length++;
             }
-
-            name.Append(starts ? char.ToUpperInvariant(c) : c);
-            starts = false;
+            else if (c != '\'')
+            {
+                length = 0;
+            }
         }
 
         return name.Length == 0 ? "Rule" : name.ToString();

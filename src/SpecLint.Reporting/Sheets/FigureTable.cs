@@ -13,7 +13,7 @@ internal static class FigureTable
     {
         foreach (Figure figure in figures)
         {
-            var (number, band, unit) = QuantityText.Parts(
+            var (number, band, unit) = BandText.Parts(
                 figure.Outcome.Value, figure.Outcome.Uncertainty, figure.Definition.DisplayUnit, figure.Definition.Dimension);
             string spread = band.Length > 0 ? "± " + band : figure.Outcome.IsAssumed ? "assumed" : "";
             page.Line($"    {TextPage.Pad(figure.Name, 34)}{number,12}  {TextPage.Pad(unit.Symbol, 8)}  {spread}");

@@ -57,7 +57,7 @@ internal static class FindingPart
         if (finding.Margin is { } margin)
         {
             string measured = ReviewWords.Measured(finding);
-            Labelled(page, "margin", QuantityText.Margin(margin) + (measured.Length > 0 ? $" ({measured})" : ""));
+            Labelled(page, "margin", BandText.Margin(margin) + (measured.Length > 0 ? $" ({measured})" : ""));
         }
 
         WriteMoved(page, review, finding);

@@ -80,9 +80,9 @@ public static class ReviewWords
             return "";
         }
 
-        string measured = "measured " + QuantityText.Band(value, finding.Uncertainty ?? 0, finding.DisplayUnit, finding.Dimension);
+        string measured = "measured " + BandText.Band(value, finding.Uncertainty ?? 0, finding.DisplayUnit, finding.Dimension);
         return finding.Limit is not { } limit ? measured
-            : $"{measured}, {Relation(finding, value, limit)} {QuantityText.Value(limit, finding.DisplayUnit, finding.Dimension)} required";
+            : $"{measured}, {Relation(finding, value, limit)} {BandText.Value(limit, finding.DisplayUnit, finding.Dimension)} required";
     }
 
     private static string Relation(Finding finding, double value, double limit)

@@ -107,6 +107,17 @@ internal sealed class TextPage
         }
     }
 
+    /// <summary>One line whose spaces are kept, behind a lead.</summary>
+    /// <param name="lead">What stands before it.</param>
+    /// <param name="text">The text, known to fit.</param>
+    /// <param name="emphasis">Emphasis of the lead.</param>
+    public void Columned(string lead, string text, Emphasis emphasis)
+    {
+        _writer.Write(string.IsNullOrWhiteSpace(lead) ? lead : Emphasise(lead, emphasis));
+        _writer.Write(text.TrimEnd());
+        _writer.Write('\n');
+    }
+
     private static IEnumerable<string> Break(string text, int columns)
     {
         var line = new StringBuilder();
@@ -134,14 +145,15 @@ internal sealed class TextPage
         yield return line.ToString();
     }
 
-    /// <summary>Words, with a number kept beside the unit or sign that follows it.</summary>
+    /// <summary>Words, with a number kept beside the unit or sign that follows it, and the word line beside its number.</summary>
     private static IEnumerable<string> Words(string text)
     {
         string[] words = text.Split(' ', StringSplitOptions.RemoveEmptyEntries);
         for (int i = 0; i < words.Length; i++)
         {
             bool isNumber = char.IsAsciiDigit(words[i][^1]) && words[i].AsSpan().IndexOfAnyExcept(NumberSigns) < 0;
-            if (isNumber && i + 1 < words.Length && words[i + 1].Length <= 7 && IsUnit(words[i + 1]))
+            bool hasNext = i + 1 < words.Length;
+            if (hasNext && (isNumber ? words[i + 1].Length <= 10 && IsUnit(words[i + 1]) : words[i] == "line" && char.IsAsciiDigit(words[i + 1][0])))
             {
                 yield return $"{words[i]} {words[i + 1]}";
                 i++;
@@ -156,7 +168,7 @@ internal sealed class TextPage
     private static bool IsUnit(string word)
     {
         string bare = word.TrimEnd('.', ',', ';', ':', ')');
-        return Quantities.DisplayUnit.IsKnown(bare);
+        return bare is "±" || Spec.Units.UnitTable.TryFind(bare, out _);
     }
 
     private string Emphasise(string text, Emphasis emphasis)

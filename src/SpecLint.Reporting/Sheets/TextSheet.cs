@@ -11,26 +11,29 @@ namespace SpecLint.Reporting.Sheets;
 public static class TextSheet
 {
     /// <summary>Writes a sheet for each review, and a table of all when there are several; lines end with <c>\n</c>.</summary>
-    /// <param name="reviews">The reviews in order.</param>
+    /// <param name="reviews">The reviews in order; each is let go of once it is written.</param>
     /// <param name="options">Width, colour and extent.</param>
     /// <param name="writer">Where to.</param>
-    public static void Write(IReadOnlyList<MachineReview> reviews, SheetOptions options, TextWriter writer)
+    public static void Write(IEnumerable<MachineReview> reviews, SheetOptions options, TextWriter writer)
     {
         ArgumentNullException.ThrowIfNull(reviews);
-        ArgumentNullException.ThrowIfNull(options);
         ArgumentNullException.ThrowIfNull(writer);
+        var table = new SummaryTable();
         foreach (MachineReview review in reviews)
         {
-            Write(review, options, writer);
-            if (reviews.Count > 1)
+            if (table.Count > 0)
             {
                 writer.Write("\n\n");
             }
+
+            Write(review, options, writer);
+            table.Add(review);
         }
 
-        if (reviews.Count > 1)
+        if (table.Count > 1)
         {
-            WriteSummary(reviews, options, writer);
+            writer.Write("\n\n");
+            table.Write(options, writer);
         }
     }
 
@@ -59,29 +62,6 @@ public static class TextSheet
 
         WriteHazards(page, review);
         WriteOutcome(page, review);
-    }
-
-    /// <summary>Writes the table that closes a review of several specs.</summary>
-    /// <param name="reviews">The reviews in order.</param>
-    /// <param name="options">Width and colour.</param>
-    /// <param name="writer">Where to.</param>
-    public static void WriteSummary(IReadOnlyList<MachineReview> reviews, SheetOptions options, TextWriter writer)
-    {
-        ArgumentNullException.ThrowIfNull(reviews);
-        ArgumentNullException.ThrowIfNull(options);
-        ArgumentNullException.ThrowIfNull(writer);
-        var page = new TextPage(writer, options);
-        page.Line(string.Create(CultureInfo.InvariantCulture, $"{reviews.Count} specs reviewed"), Emphasis.Heading);
-        page.Line("  outcome                holds  queries  remarks  open  spec", Emphasis.Quiet);
-        foreach (MachineReview review in reviews)
-        {
-            var unmet = review.Unmet.ToLookup(f => f.Grade);
-            int open = review.Findings.Count(f => f.Kind == FindingKind.Open);
-            string counts = string.Create(
-                CultureInfo.InvariantCulture,
-                $"{unmet[Grade.Hold].Count(),5}  {unmet[Grade.Query].Count(),7}  {unmet[Grade.Remark].Count(),7}  {open,4}  ");
-            page.Wrapped($"  {ReviewWords.Outcome(review.Outcome),-21}  {counts}", Printable.Line(review.Spec.Path));
-        }
     }
 
     private static void WriteHead(TextPage page, MachineReview review)

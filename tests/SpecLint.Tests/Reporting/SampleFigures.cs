@@ -78,7 +78,7 @@ internal static class SampleFigures
         },
         new FigureDefinition
         {
-            Name = "speed.charging", Unit = "rad/s", DisplayUnit = "1/min", Dimension = Hertz, Meaning = "where charging begins",
+            Name = "speed.charging", Unit = "rad/s", DisplayUnit = "rpm", Dimension = Hertz, Meaning = "where charging begins",
             Formula = "speed at which the line voltage reaches the load", Basis = new Basis(BasisKind.Derived, "rectifier conduction"),
             Compute = e => e.OutOfDomain("the load voltage is never reached"),
         },

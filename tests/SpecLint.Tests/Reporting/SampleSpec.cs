@@ -30,7 +30,7 @@ internal static class SampleSpec
         gap:
           clearance: 1.5 mm
         ratings:
-          speed: 300 1/min
+          speed: 300 rpm
         waivers:
           - rule: MEC-02
 
@@ -77,7 +77,7 @@ internal static class SampleSpec
         var (scale, dimension) = unit switch
         {
             "mm" => (1e-3, new Dimension(1, 0, 0, 0, 0)),
-            "1/min" => (Math.PI / 30, new Dimension(0, 0, -1, 0, 0)),
+            "rpm" => (Math.PI / 30, new Dimension(0, 0, -1, 0, 0)),
             "T" => (1, SampleFigures.Tesla),
             _ => (1.0, Dimension.None),
         };

@@ -16,7 +16,7 @@ internal static class SarifValidator
             string file = Path.Combine(folder, "log.sarif");
             await File.WriteAllTextAsync(file, log, cancellation);
             var start = new ProcessStartInfo(program!) { UseShellExecute = false, RedirectStandardOutput = true, RedirectStandardError = true, WorkingDirectory = folder };
-            foreach (string argument in (string[])["validate", "--rule-kind", "Sarif;Ghas", "--level", "Error;Warning;Note", file])
+            foreach (string argument in (string[])["validate", "--rule-kind", "Sarif;Ghas", file])
             {
                 start.ArgumentList.Add(argument);
             }

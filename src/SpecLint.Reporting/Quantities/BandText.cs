@@ -4,7 +4,7 @@ using SpecLint.Spec.Units;
 namespace SpecLint.Reporting.Quantities;
 
 /// <summary>Writes quantities for people: four significant digits, the unit after a space, a band rounded with its value.</summary>
-internal static class QuantityText
+internal static class BandText
 {
     private const int Digits = 4;
 
