@@ -63,7 +63,7 @@ internal sealed class ExpressionBinder(string text, ExpressionScope scope)
             };
         }
 
-        if (scope.FindKey(token.Text) is not { } key)
+        if (ExpressionScope.FindKey(token.Text) is not { } key)
         {
             return UnknownName(token);
         }
@@ -71,10 +71,10 @@ internal sealed class ExpressionBinder(string text, ExpressionScope scope)
         Add(Keys, key.Key);
         return key.Kind switch
         {
-            NamedKeyKind.Number => new Typed(new KeyNumberNode(key.Key), TypedKind.Number, token.Start, end)
+            NamedKeyKind.Number => new Typed(new KeyNumberNode(key.Key, key.Dimension), TypedKind.Number, token.Start, end)
             {
                 Dimension = key.Dimension,
-                Unit = key.Dimension == TemperatureDimension ? "°C" : "",
+                Unit = key.DisplayUnit,
             },
             NamedKeyKind.Text => new Typed(new KeyTextNode(key.Key), TypedKind.Text, token.Start, end) { Words = key.Words },
             NamedKeyKind.Flag => new Typed(new KeyFlagNode(key.Key), TypedKind.Condition, token.Start, end),
@@ -97,9 +97,9 @@ internal sealed class ExpressionBinder(string text, ExpressionScope scope)
             return new Typed(new KnownNode(figure.Name), TypedKind.Condition, name.Start, end);
         }
 
-        if (scope.FindKey(argument.Text) is not { } key)
+        if (ExpressionScope.FindKey(argument.Text) is not { } key)
         {
-            return Fail($"there is no key {argument.Text}{NearestName.Suggestion(argument.Text, scope.KeyNames)}", argument.Start, argument.Length);
+            return Fail($"there is no key {argument.Text}{NearestName.Suggestion(argument.Text, ExpressionScope.KeyNames)}", argument.Start, argument.Length);
         }
 
         Add(Keys, key.Key);
@@ -327,8 +327,6 @@ internal sealed class ExpressionBinder(string text, ExpressionScope scope)
         };
     }
 
-    private static Dimension TemperatureDimension { get; } = new(0, 0, 0, 0, 1);
-
     private IEnumerable<string> FigureNames => scope.Figures.Definitions.Select(d => d.Name);
 
     private static ExpressionNode Negated(ExpressionNode operand) =>
@@ -415,7 +413,7 @@ internal sealed class ExpressionBinder(string text, ExpressionScope scope)
 
     private Typed? UnknownName(Token token)
     {
-        string advice = NearestName.Suggestion(token.Text, FigureNames.Concat(scope.KeyNames));
+        string advice = NearestName.Suggestion(token.Text, FigureNames.Concat(ExpressionScope.KeyNames));
         int hyphen = token.Text.IndexOf('-', StringComparison.Ordinal);
         if (hyphen > 0 && IsKnown(token.Text[..hyphen]))
         {
@@ -429,7 +427,7 @@ internal sealed class ExpressionBinder(string text, ExpressionScope scope)
         return Fail($"{token.Text} is neither a figure nor a key{advice}", token.Start, token.Length);
     }
 
-    private bool IsKnown(string name) => scope.Figures.Find(name) is not null || scope.FindKey(name) is not null;
+    private bool IsKnown(string name) => scope.Figures.Find(name) is not null || ExpressionScope.FindKey(name) is not null;
 
     private bool AreNumbers(Typed left, Typed right)
     {

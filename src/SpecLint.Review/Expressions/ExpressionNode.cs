@@ -1,4 +1,5 @@
 using SpecLint.Spec.Documents;
+using SpecLint.Spec.Units;
 
 namespace SpecLint.Review.Expressions;
 
@@ -23,10 +24,15 @@ internal sealed record FigureNode(string Name) : ExpressionNode
     public override Evaluated Evaluate(in ExpressionContext context) => context.Figure(Name);
 }
 
-internal sealed record KeyNumberNode(string Key) : ExpressionNode
+internal sealed record KeyNumberNode(string Key, Dimension Dimension) : ExpressionNode
 {
-    public override Evaluated Evaluate(in ExpressionContext context) =>
-        context.Graph.Spec.Find(Key) is { Kind: SpecValueKind.Number } value ? Evaluated.Of(value.Number) : Evaluated.Missing([Key]);
+    /// <remarks>The same key may take another quantity in another machine: a rated speed is a velocity in a linear one.</remarks>
+    public override Evaluated Evaluate(in ExpressionContext context) => context.Graph.Spec.Find(Key) switch
+    {
+        { Kind: SpecValueKind.Number } value when value.Dimension == Dimension => Evaluated.Of(value.Number),
+        { Kind: SpecValueKind.Number } => Evaluated.NotApplicable($"{Key} is another quantity in this machine"),
+        _ => Evaluated.Missing([Key]),
+    };
 }
 
 internal sealed record KeyTextNode(string Key) : ExpressionNode

@@ -36,7 +36,7 @@ public static class ReadingReview
         foreach (SpecFault fault in spec.Faults)
         {
             string said = rule.Say.Length == 0 ? "" : rule.Say;
-            Finding finding = Finding(rule, FindingKind.Unmet, MessageWriter.Join(said, fault.Message), fault.Key, fault.Region);
+            Finding finding = Finding(rule, FindingKind.Unmet, MessageWriter.Join(said, fault.Message), fault.AbsentKey.Length > 0 ? fault.AbsentKey : fault.Key, fault.Region);
             yield return fault.Related is { } place
                 ? finding with { Related = [new RelatedPlace(fault.Key, place, fault.RelatedMessage)] }
                 : finding;

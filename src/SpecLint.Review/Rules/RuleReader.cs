@@ -188,9 +188,9 @@ internal sealed class RuleReader(string rulebook, ExpressionScope scope, SharedT
         var levers = ImmutableArray.CreateBuilder<string>();
         foreach (YamlScalar lever in fields.Scalars("levers"))
         {
-            if (scope.FindKey(lever.Text) is null)
+            if (ExpressionScope.FindKey(lever.Text) is null)
             {
-                faults.Add($"there is no key {FieldReader.Short(lever.Text)}{NearestName.Suggestion(lever.Text, scope.KeyNames)}", lever.Region);
+                faults.Add($"there is no key {FieldReader.Short(lever.Text)}{NearestName.Suggestion(lever.Text, ExpressionScope.KeyNames)}", lever.Region);
             }
             else
             {
