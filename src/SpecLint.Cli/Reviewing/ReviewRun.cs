@@ -22,12 +22,14 @@ internal static class ReviewRun
         var problems = new List<string>();
         IReadOnlyList<string> files = SpecFiles.Expand(request.Paths, problems);
         ImmutableArray<Rulebook> books = RulebookSource.Load(request.Rulebooks);
-        var options = new ReviewOptions { On = request.On };
-        var reviews = new List<MachineReview>(files.Count);
         SheetOptions sheet = Terminal.SheetOptions(request.IncludesAll);
+        SarifLogBuilder? log = request.SarifPath is null ? null : NewLog(request, books);
+        var summary = new SummaryTable();
+        var kept = new List<MachineReview>();
+        bool fails = false;
         using (var progress = new Progress(files.Count, streams.Error))
         {
-            foreach (Attempt attempt in Attempts(files, request, books, options, streams))
+            foreach (Attempt attempt in Attempts(files, request, books, streams))
             {
                 progress.Step();
                 if (attempt.Review is not { } review)
@@ -36,22 +38,38 @@ internal static class ReviewRun
                     continue;
                 }
 
-                if (!request.PrintsJson)
+                fails |= review.Gravest >= request.FailAt;
+                summary.Add(review);
+                log?.Add(review);
+                if (request.PrintsJson)
+                {
+                    review.Figures?.ForgetParts();
+                    kept.Add(review);
+                }
+                else
                 {
                     progress.Clear();
                     PrintSheet(review, files.Count, sheet, streams.Output);
                 }
-
-                reviews.Add(review);
-                if (files.Count > 1)
-                {
-                    review.Figures?.ForgetParts();
-                }
             }
         }
 
-        Finish(request, reviews, books, sheet, problems, streams);
-        bool fails = reviews.Any(r => r.Gravest >= request.FailAt);
+        if (request.PrintsJson && summary.Count > 0)
+        {
+            streams.Output.Flush();
+            JsonSummary.Write(kept, sheet, streams.RawOutput);
+        }
+        else if (summary.Count > 1)
+        {
+            summary.Write(sheet, streams.Output);
+        }
+
+        if (log is not null && summary.Count > 0)
+        {
+            WriteLog(request.SarifPath!, log, problems);
+        }
+
+        problems.ForEach(p => streams.Error.WriteLine($"spec-lint: {p}"));
         return problems.Count > 0 ? ExitCode.CouldNotRun : fails ? ExitCode.Findings : ExitCode.Clear;
     }
 
@@ -66,53 +84,20 @@ internal static class ReviewRun
         output.Flush();
     }
 
-    private static void Finish(
-        ReviewRequest request,
-        List<MachineReview> reviews,
-        ImmutableArray<Rulebook> books,
-        SheetOptions sheet,
-        List<string> problems,
-        Streams streams)
+    private static SarifLogBuilder NewLog(ReviewRequest request, ImmutableArray<Rulebook> books) => new(new SarifOptions
     {
-        if (reviews.Count > 0 && request.PrintsJson)
-        {
-            streams.Output.Flush();
-            JsonSummary.Write(reviews, sheet, streams.RawOutput);
-        }
-        else if (reviews.Count > 1)
-        {
-            TextSheet.WriteSummary(reviews, sheet, streams.Output);
-        }
+        Rules = [.. books.SelectMany(b => b.Rules)],
+        WorkingFolder = Directory.GetCurrentDirectory(),
+        IncludesAll = request.IncludesAll,
+        LeavesOutWaived = request.LeavesOutWaived,
+    });
 
-        if (request.SarifPath is { } path && reviews.Count > 0)
-        {
-            WriteLog(path, request, reviews, books, problems);
-        }
-
-        foreach (string problem in problems)
-        {
-            streams.Error.WriteLine($"spec-lint: {problem}");
-        }
-    }
-
-    private static void WriteLog(
-        string path,
-        ReviewRequest request,
-        List<MachineReview> reviews,
-        ImmutableArray<Rulebook> books,
-        List<string> problems)
+    private static void WriteLog(string path, SarifLogBuilder log, List<string> problems)
     {
-        var options = new SarifOptions
-        {
-            Rules = [.. books.SelectMany(b => b.Rules)],
-            WorkingFolder = Directory.GetCurrentDirectory(),
-            IncludesAll = request.IncludesAll,
-            LeavesOutWaived = request.LeavesOutWaived,
-            RanToTheEnd = problems.Count == 0,
-        };
+        log.RanToTheEnd = problems.Count == 0;
         try
         {
-            AtomicFile.Write(path, stream => SarifLogWriter.Write(reviews, options, stream));
+            AtomicFile.Write(path, log.Write);
         }
         catch (OutputException e)
         {
@@ -124,9 +109,9 @@ internal static class ReviewRun
         IReadOnlyList<string> files,
         ReviewRequest request,
         ImmutableArray<Rulebook> books,
-        ReviewOptions options,
         Streams streams)
     {
+        var options = new ReviewOptions { On = request.On };
         Attempt One(string file)
         {
             try

@@ -73,7 +73,7 @@ internal static class ConductorFigures
 
         bool assumed = grade.Length == 0;
         string column = $"overall-{(assumed ? "grade-2" : grade)}";
-        ReferenceRow? row = OurTables.All.Find("wire-metric")?.FindRow(r => r.Number("diameter") >= bare * (1 - 1e-9));
+        ReferenceRow? row = EmbeddedRulebooks.Tables.Find("wire-metric")?.FindRow(r => r.Number("diameter") >= bare * (1 - 1e-9));
         if (row?.Number("diameter") is not { } preferred || row.Number(column) is not { } greatest)
         {
             return x.OutOfDomain("the wire lies outside the table of enamelled sizes");
@@ -93,7 +93,7 @@ internal static class ConductorFigures
 
         double gauge = 36 - (39 * Math.Log(bare / 0.127e-3) / Math.Log(92));
         bool wholeGauge = Math.Abs(gauge - Math.Round(gauge)) < 0.02 && gauge is > -4 and < 45;
-        bool preferred = OurTables.All.Find("wire-metric")?.FindRow(r => Math.Abs((r.Number("diameter") ?? 0) - bare) < 1e-3 * bare) is not null;
+        bool preferred = EmbeddedRulebooks.Tables.Find("wire-metric")?.FindRow(r => Math.Abs((r.Number("diameter") ?? 0) - bare) < 1e-3 * bare) is not null;
         return x.Value(wholeGauge || preferred || IsIntermediate(bare) ? 1 : 0);
     }
 

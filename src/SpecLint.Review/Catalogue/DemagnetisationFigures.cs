@@ -9,9 +9,110 @@ internal static class DemagnetisationFigures
     /// <summary>Share of the intrinsic coercivity up to which the demagnetisation line is taken as straight (the knee).</summary>
     private const double KneeShare = 0.9;
 
+    private const string Knee = "1 − opposing field / (0.9 × least intrinsic coercivity)";
+
+    /// <summary>Opposing field inside the installed magnet per tesla of remanence.</summary>
+    public static PartDefinition<Shape<DemagnetisingField>> Installed { get; } = new("opposing field inside the installed magnet", x =>
+        x.Part(FieldParts.Row) is { } row && x.Part(FieldParts.Layers) is { } layers
+            ? new(DemagnetisingField.Of(row.Outline, layers.Outline))
+            : null);
+
+    /// <summary>Opposing field inside one magnet alone in air, per tesla of remanence.</summary>
+    public static PartDefinition<Shape<DemagnetisingField>> Loose { get; } = new("opposing field inside a loose magnet", ReadLoose);
+
     public static IEnumerable<FigureDefinition> All =>
     [
         Define.Figure("permeance.coefficient", FigureUnit.Ratio, "permeance coefficient as installed, open circuit, mean of the magnet", "(1 − N) / N with N the mean demagnetising factor from the harmonic solution", Sources.Field, x =>
             x.Part(FieldParts.Field) is { } solved ? x.Value(solved.PermeanceCoefficient) : x.Stop()) with { MethodUncertainty = 0.02 },
+        Define.Figure("permeance.coefficient.loose", FigureUnit.Ratio, "permeance coefficient of one magnet alone in air, mean of the magnet", "(1 − N) / N with N the mean demagnetising factor of the free magnet", Sources.FreeMagnet, x =>
+            x.Part(Loose) is { } loose ? x.Value((1 - loose.Outline.Mean) / loose.Outline.Mean) : x.Stop()) with { MethodUncertainty = 0.05 },
+        Define.Figure("demagnetisation.opposing-field", FigureUnit.FieldStrength, "opposing field exceeded in 1 % of the installed magnet's volume, open circuit, hottest", "image sums over the magnet's volume × {magnet.remanence.hot} / μ0", Sources.Field, x =>
+            Opposing(x, Installed, "magnet.remanence.hot")) with { MethodUncertainty = 0.03 },
+        Define.Figure("demagnetisation.opposing-field.cold", FigureUnit.FieldStrength, "opposing field exceeded in 1 % of the installed magnet's volume, open circuit, at the coldest ambient", "image sums over the magnet's volume × {magnet.remanence.cold} / μ0", Sources.Field, x =>
+            Opposing(x, Installed, "magnet.remanence.cold")) with { MethodUncertainty = 0.03 },
+        Define.Figure("demagnetisation.margin", FigureUnit.Ratio, "margin to the knee at open circuit, hottest", Knee + " from {demagnetisation.opposing-field} and {magnet.coercivity-intrinsic.hot}", Sources.Field, x =>
+            Margin(x, "demagnetisation.opposing-field", "magnet.coercivity-intrinsic.hot")),
+        Define.Figure("demagnetisation.margin.cold", FigureUnit.Ratio, "ferrite: margin to the knee at open circuit, at the coldest ambient", Knee + " from {demagnetisation.opposing-field.cold} and {magnet.coercivity-intrinsic.cold}", Sources.Field, x =>
+            MagnetFigures.IsFerrite(x)
+                ? Margin(x, "demagnetisation.opposing-field.cold", "magnet.coercivity-intrinsic.cold")
+                : Known(x)),
+        Define.Figure("demagnetisation.margin.loose", FigureUnit.Ratio, "margin to the knee of one unmounted magnet at the temperature of curing or hot storage", Knee + " of one magnet in air at {magnet.loose-temperature}", Sources.FreeMagnet, LooseMargin) with { MethodUncertainty = 0.03 },
+        Define.Figure("magnet.loose-temperature", FigureUnit.Kelvin, "temperature that unmounted magnets meet: curing of the resin or hot storage", "60 °C", Sources.PracticeTable, x =>
+            x.Assume(LooseTemperature, "hot storage or a warm cure, common practice")),
     ];
+
+    private const double LooseTemperature = 333.15;
+
+    private static Outcome Opposing(Evaluation x, PartDefinition<Shape<DemagnetisingField>> part, string remanence)
+    {
+        double flux = x.Figure(remanence);
+        return x.Part(part) is { } opposing && !x.Incomplete
+            ? x.Value(opposing.Outline.ExceededInOnePercent * flux / MagneticConstant.Mu0)
+            : x.Stop();
+    }
+
+    private static Outcome Margin(Evaluation x, string opposing, string coercivity)
+    {
+        double field = x.Figure(opposing);
+        double knee = KneeShare * x.Figure(coercivity);
+        if (x.Incomplete)
+        {
+            return x.Stop();
+        }
+
+        if (knee <= 0)
+        {
+            return x.Value(-1, 0);
+        }
+
+        double ratio = field / knee;
+        Outcome a = x.Look(opposing);
+        Outcome b = x.Look(coercivity);
+        double relative = double.Hypot(a.Uncertainty / Math.Max(a.Value, 1), b.Uncertainty / Math.Max(b.Value, 1));
+        return x.Value(1 - ratio, ratio * relative);
+    }
+
+    private static Outcome Known(Evaluation x) =>
+        x.Look("magnet.coercivity-coefficient").HasValue
+            ? x.NotApplicable("only ferrite loses coercivity in the cold")
+            : Lacking(x);
+
+    private static Outcome Lacking(Evaluation x)
+    {
+        _ = x.Figure("magnet.coercivity-coefficient");
+        return x.Stop();
+    }
+
+    private static Outcome LooseMargin(Evaluation x)
+    {
+        double temperature = x.Figure("magnet.loose-temperature");
+        double rise = temperature - MagnetFigures.ReferenceTemperature;
+        double remanence = x.Figure("magnet.remanence") * (1 + (x.Figure("magnet.remanence-coefficient") * rise));
+        double coercivity = x.Figure("magnet.coercivity-intrinsic") * (1 + (x.Figure("magnet.coercivity-coefficient") * rise));
+        if (x.Part(Loose) is not { } loose || x.Incomplete)
+        {
+            return x.Stop();
+        }
+
+        double ratio = loose.Outline.ExceededInOnePercent * remanence / MagneticConstant.Mu0 / (KneeShare * Math.Max(coercivity, 1));
+        return x.Value(1 - ratio, 0.05 * ratio);
+    }
+
+    private static Shape<DemagnetisingField>? ReadLoose(Evaluation x)
+    {
+        if (x.Part(FieldParts.Row) is not { } row || x.Part(FieldParts.Layers) is not { } layers)
+        {
+            return null;
+        }
+
+        // A row stretched until the neighbours no longer matter, without steel, is one magnet in air.
+        const double Apart = 40;
+        MagneticLayers alone = layers.Outline with { Behind = SteelPlate.None, Opposite = OppositeSide.Open, OppositePlate = SteelPlate.None, Gap = 0 };
+        MagnetGeometry magnet = row.Outline;
+        double reach = Math.Max(magnet.Length, magnet.Width);
+        MagnetGeometry lone = magnet.Shape == MagnetShape.Disc
+            ? MagnetGeometry.LinearDisc(Apart * magnet.Length, magnet.Length)
+            : MagnetGeometry.LinearBlock(Apart * reach, magnet.Length, Math.Max(magnet.Width, x.Figure("magnet.extent")));
+        return new(DemagnetisingField.Of(lone, alone));
+    }
 }

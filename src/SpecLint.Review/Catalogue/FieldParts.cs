@@ -1,6 +1,7 @@
 using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Magnetics;
 using SpecLint.Review.Figures;
+using SpecLint.Review.Rules;
 using CoilPlan = SpecLint.Physics.Magnetics.CoilGeometry;
 
 namespace SpecLint.Review.Catalogue;
@@ -129,7 +130,7 @@ internal static class FieldParts
             return SteelPlate.Ideal;
         }
 
-        double? permeability = OurTables.All.Find("steels")?.FindRow("material", material)?.Number("relative-permeability");
+        double? permeability = EmbeddedRulebooks.Tables.Find("steels")?.FindRow("material", material)?.Number("relative-permeability");
         return permeability is { } known ? Plate(x, section, known) : Plate(x, section, 1000);
     }
 

@@ -28,6 +28,7 @@ internal static class HeatFigures
         }),
         Define.Figure("loss.winding-eddy", FigureUnit.Watt, "eddy-current loss in the strands of all legs at rated speed, wire at 20 °C", "copper volume × ω² × Σ(n·B_n)² × {winding.wire.size}² / (32 ρ), with {field.legs.weighted} in the legs and {field.bars.weighted} in the end bars", Sources.StrandEddy, Eddy) with { MethodUncertainty = EddyMethod },
         Define.Figure("loss.winding-circulation", FigureUnit.Watt, "loss of currents that circulate between untransposed strands in hand at rated speed, upper estimate", "strand EMF differences across the bundle over the strands' resistance", new Basis(BasisKind.Derived, "EMF difference of strands laid side by side; effect described by Wang and Kamper, IEEE Trans. Energy Convers. 19 (2004)"), Circulation) with { MethodUncertainty = 0.5, IsCoarse = true },
+        Define.Figure("winding.delta-circulation", FigureUnit.Percent, "loss of the current that the third and its multiples drive round a delta, over the copper loss of the load", "(third-harmonic EMF / |R + j3ωL0|)² over {current.phase.rms}²", new Basis(BasisKind.Published, "third harmonics in delta: Fitzgerald, Kingsley, Umans, Electric Machinery, 6th ed. 2003, appendix on three-phase circuits"), DeltaLoss) with { MethodUncertainty = 0.1 },
         Define.Figure("loss.winding-ac.share", FigureUnit.Percent, "eddy and circulating loss over rated power", "({loss.winding-eddy} + {loss.winding-circulation}) / {power.rated}", Sources.Arithmetic, x =>
             x.Value((x.Figure("loss.winding-eddy") + (x.OptionalFigure("loss.winding-circulation") ?? 0)) / x.Figure("power.rated"))),
         Define.Figure("wire.strand.halving", FigureUnit.Metre, "strand diameter that would halve the eddy loss at the same copper section", "{winding.wire.size} / √2", Sources.StrandEddy, x =>
@@ -86,6 +87,33 @@ internal static class HeatFigures
         double coils = x.Number("winding.coils");
         double speed = RatingFigures.ElectricalSpeed(x);
         return x.Incomplete ? x.Stop() : x.Value(coils * StrandCirculation.LossOfCoil(bundle, speed, field, span));
+    }
+
+    private static Outcome DeltaLoss(Evaluation x)
+    {
+        if ((x.OptionalText("winding.connection") ?? "star") != "delta")
+        {
+            return x.NotApplicable("the phases are not in delta");
+        }
+
+        int phases = x.Count("machine.phases");
+        double current = x.Figure("current.phase.rms");
+        double speed = x.Figure("speed.rated");
+        double resistance = x.Figure("resistance.phase.cold");
+        double electrical = RatingFigures.ElectricalSpeed(x);
+        if (x.Part(EmfFigures.PhaseWave) is not { } wave || x.Part(ConductorFigures.Phase) is not { } inductance || x.Incomplete)
+        {
+            return x.Stop();
+        }
+
+        var circuit = new DeltaCircuit
+        {
+            PhaseResistance = resistance,
+            ZeroSequenceInductance = Math.Max(0, inductance.Outline.ZeroSequence),
+            ElectricalSpeed = electrical,
+            Phases = Math.Max(3, phases),
+        };
+        return x.Value(DeltaCirculation.LossRatio(DeltaCirculation.RmsCurrent(wave.Scaled(speed), circuit), current));
     }
 
     private static Outcome Coefficient(Evaluation x)

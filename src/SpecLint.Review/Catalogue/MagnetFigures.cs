@@ -48,7 +48,7 @@ internal static class MagnetFigures
     public static bool IsFerrite(Evaluation x) => x.OptionalFigure("magnet.coercivity-coefficient") > 0;
 
     private static ReferenceRow? Row(Evaluation x) =>
-        x.OptionalText("magnets.grade") is { } grade ? OurTables.All.Find(GradeTable)?.FindRow("grade", grade) : null;
+        x.OptionalText("magnets.grade") is { } grade ? EmbeddedRulebooks.Tables.Find(GradeTable)?.FindRow("grade", grade) : null;
 
     private static Outcome OfGrade(Evaluation x, string column)
     {

@@ -29,7 +29,7 @@ internal static class PracticeFigures
             return x.Stop();
         }
 
-        ReferenceRow? row = OurTables.All.Find("running-clearance")?.FindRow(r =>
+        ReferenceRow? row = EmbeddedRulebooks.Tables.Find("running-clearance")?.FindRow(r =>
             r.Text("kind") == kind && r.Number("diameter-from") <= size && size < r.Number("diameter-to"));
         return row?.Number("warn-below") is { } least
             ? x.Value(Math.Max(least, (row.Number("diameter-share") ?? 0) * size))
@@ -40,7 +40,7 @@ internal static class PracticeFigures
     {
         string method = x.Text("winding.method");
         return x.Incomplete ? x.Stop()
-            : OurTables.All.Find("fill-practice")?.FindRow("method", method)?.Number(column) is { } fill ? x.Value(fill)
+            : EmbeddedRulebooks.Tables.Find("fill-practice")?.FindRow("method", method)?.Number(column) is { } fill ? x.Value(fill)
             : x.OutOfDomain($"the table of fill factors has no row for '{method}'");
     }
 
@@ -48,7 +48,7 @@ internal static class PracticeFigures
     {
         string cooling = x.Text("environment.cooling.method");
         return x.Incomplete ? x.Stop()
-            : OurTables.All.Find("current-density")?.FindRow("cooling", cooling)?.Number(column) is { } density ? x.Value(density)
+            : EmbeddedRulebooks.Tables.Find("current-density")?.FindRow("cooling", cooling)?.Number(column) is { } density ? x.Value(density)
             : x.OutOfDomain($"the table of current densities has no row for '{cooling}'");
     }
 
@@ -56,7 +56,7 @@ internal static class PracticeFigures
     {
         double least = double.PositiveInfinity;
         if (x.OptionalText("ratings.insulation-class") is { } letter
-            && OurTables.All.Find("insulation-classes")?.FindRow("class", letter)?.Number("temperature") is { } ofClass)
+            && EmbeddedRulebooks.Tables.Find("insulation-classes")?.FindRow("class", letter)?.Number("temperature") is { } ofClass)
         {
             least = ofClass;
         }

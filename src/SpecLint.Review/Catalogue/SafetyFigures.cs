@@ -20,7 +20,7 @@ internal static class SafetyFigures
         bool dry = x.OptionalText("environment.exposure") == "indoor";
         string where = dry ? "dry, indoors" : "any other place";
         bool direct = x.Look("voltage.overspeed.direct").HasValue;
-        ReferenceRow? row = OurTables.All.Find("touch-voltage")?.FindRow("case", dry ? "dry" : "other");
+        ReferenceRow? row = EmbeddedRulebooks.Tables.Find("touch-voltage")?.FindRow("case", dry ? "dry" : "other");
         return row?.Number(direct ? "direct" : "alternating-peak") is { } limit
             ? x.Value(limit)
             : x.OutOfDomain($"the table of touch voltages has no row for {where}");

@@ -12,7 +12,7 @@ internal static class SteelCurve
     {
         double field = 0;
         double density = 0;
-        ReferenceTable? table = OurTables.All.Find("bh-mild-steel");
+        ReferenceTable? table = EmbeddedRulebooks.Tables.Find("bh-mild-steel");
         foreach (ReferenceRow row in table?.Rows ?? [])
         {
             if (row.Number("field") is not { } nextField || row.Number("flux-density-cautious") is not { } nextDensity)
