@@ -309,7 +309,7 @@ internal sealed class ExpressionBinder(string text, ExpressionScope scope)
                 return null;
             }
 
-            var side = new Typed(new TextNode(""), key.IsNumber ? TypedKind.Number : TypedKind.Text, by.Start, by.Start + by.Length)
+            var side = new Typed(new ColumnNode(), key.IsNumber ? TypedKind.Number : TypedKind.Text, by.Start, by.Start + by.Length)
             {
                 Dimension = key.Dimension,
             };

@@ -84,6 +84,12 @@ internal sealed record ChoiceNode(ExpressionNode Condition, ExpressionNode Then,
     }
 }
 
+/// <summary>Stands for a row's cell while the conditions on a table are checked; it is never evaluated.</summary>
+internal sealed record ColumnNode : ExpressionNode
+{
+    public override Evaluated Evaluate(in ExpressionContext context) => Evaluated.OutOfDomain("a column has no value outside its table");
+}
+
 /// <summary>One condition on a column of a reference table.</summary>
 internal sealed record TableSelector(string Column, Comparison Comparison, ExpressionNode Wanted);
 

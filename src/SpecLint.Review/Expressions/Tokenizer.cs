@@ -138,9 +138,12 @@ internal sealed class Tokenizer
         while (at < _text.Length)
         {
             char c = _text[at];
+            char next = at + 1 < _text.Length ? _text[at + 1] : '\0';
             bool opens = c == '(' && _text[at - 1] == '/';
             bool closes = c == ')' && _text.AsSpan(start, at - start).Contains('(');
-            if (opens || closes || char.IsLetterOrDigit(c) || c is '%' or '°' or '‰' or '·' or '/' or '*' or '^' or '²' or '³' or '¹' or '⁻')
+            bool joins = c is '·' or '/' or '*' && (char.IsLetter(next) || next is '%' or '°' or '(');
+            bool raises = c == '^' && (char.IsAsciiDigit(next) || next == '-');
+            if (opens || closes || joins || raises || char.IsLetterOrDigit(c) || c is '%' or '°' or '‰' or '²' or '³' or '¹' or '⁻' || (c == '-' && _text[at - 1] == '^'))
             {
                 at++;
                 if (closes)
@@ -152,11 +155,6 @@ internal sealed class Tokenizer
             {
                 break;
             }
-        }
-
-        while (at > start && _text[at - 1] is '/' or '*' or '·' or '^')
-        {
-            at--;
         }
 
         return at;

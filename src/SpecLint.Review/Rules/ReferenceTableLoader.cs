@@ -177,7 +177,8 @@ public static class ReferenceTableLoader
                 _columns.Add(known);
             }
 
-            bool fits = known.IsNumber == number is not null && (number is null || known.Dimension == dimension) && (unit is null || number is not null);
+            bool keepsUnit = unit is null || (number is not null && dimension == unit.Dimension);
+            bool fits = keepsUnit && known.IsNumber == number is not null && (number is null || known.Dimension == dimension);
             if (!fits)
             {
                 string expected = unit is not null ? $"a number in {unit.Spelling}"
