@@ -56,7 +56,7 @@ public static class StarOfSlots
     }
 
     /// <summary>Star of coils at stated angles.</summary>
-    /// <param name="mechanicalAngles">Angle of each coil axis [rad].</param>
+    /// <param name="mechanicalAngles">Angle of each coil axis [rad]; for a linear machine pi x/pole pitch with one pole pair.</param>
     /// <param name="polePairs">Pole pairs, >= 1.</param>
     /// <param name="phases">Phases, >= 1.</param>
     /// <returns>The layout; balance is judged by the residual.</returns>

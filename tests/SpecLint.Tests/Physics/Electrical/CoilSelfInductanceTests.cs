@@ -142,6 +142,15 @@ public sealed class CoilSelfInductanceTests
         Assert.True(double.IsNaN(CoilSelfInductance.Of(Keystone with { HoleLength = 0.4 }, 1.0, IronPlanes.None).Value));
 
     [Fact]
+    public void Self_NegativeDistance_IsNotANumber() =>
+        Assert.True(double.IsNaN(CoilSelfInductance.Of(Keystone, 1.0, new IronPlanes(-0.001, 0.01)).Value));
+
+    // A leg of a thousandth of the coil's size is beyond the panels that the work limit allows: said so, not guessed.
+    [Fact]
+    public void Self_TooSlender_IsNotANumberInBoundedWork() =>
+        Assert.True(double.IsNaN(CoilSelfInductance.Of(Rectangle with { HoleLength = 1.0, HoleWidth = 1.0, LegWidth = 1e-4, Thickness = 1e-4 }, 1.0, IronPlanes.None).Value));
+
+    [Fact]
     public void Self_Scaling_IsLengthTimesTurnsSquared() =>
         Gen.Select(Gen.Double[0.2, 5.0], Gen.Double[1.0, 200.0], Gen.Double[0.002, 0.05]).Sample(
             (scale, turns, distance) =>
