@@ -1,6 +1,5 @@
 using System.Collections.Immutable;
 using System.Numerics;
-using MathNet.Numerics;
 using SpecLint.Physics.Geometry;
 
 namespace SpecLint.Physics.Electrical;
@@ -15,7 +14,7 @@ namespace SpecLint.Physics.Electrical;
 /// <seealso>W.G. Hurley, M.C. Duffy, IEEE Trans. Magn. 31(4), 1995, 2416-2422; rotation and shift theorems of the Fourier transform.</seealso>
 public static class CoilMutualInductance
 {
-    private const double RelativeTolerance = 5e-5;
+    private const double RelativeTolerance = 1e-4;
     private const int LeastPanels = 4;
     private const int MostPanels = 240;
     private const int MostCoils = 720;
@@ -235,7 +234,7 @@ public static class CoilMutualInductance
                 double power = half * GaussPanel.Weights[node] * k * CoilLayerResponse.Of(k, coil.Thickness, planes) * value * value;
                 for (int separation = 1; separation < integrals.Length; separation++)
                 {
-                    part[separation] += power * SpecialFunctions.BesselJ(0, k * distances[separation]);
+                    part[separation] += power * FirstKindBessel.J0(k * distances[separation]);
                 }
             }
 

@@ -1,5 +1,4 @@
 using System.Runtime.InteropServices;
-using MathNet.Numerics;
 using SpecLint.Physics.Geometry;
 
 namespace SpecLint.Physics.Electrical;
@@ -42,7 +41,7 @@ internal readonly struct RingTransform
             for (int node = 0; node < GaussPanel.Count; node++)
             {
                 double radius = middle + half * GaussPanel.Nodes[node];
-                sum += GaussPanel.Weights[node] * radius * SpecialFunctions.BesselJ(1, waveNumber * radius);
+                sum += GaussPanel.Weights[node] * radius * FirstKindBessel.J1(waveNumber * radius);
             }
         }
 

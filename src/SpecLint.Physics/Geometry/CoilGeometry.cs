@@ -10,7 +10,7 @@ public static class CoilGeometry
     /// The inner leg edge at the middle of the hole gives R sin(b) - (h/2) cos(b) = w/2, solved in closed form:
     /// b = atan(h/2R) + asin((w/2)/hypot(R, h/2)). NaN if the leg is wider than the radius allows.
     /// </remarks>
-    /// <seealso>Geometry of the design document, section 4; derived.</seealso>
+    /// <seealso>Derived from the definition of the keystone in the spec format.</seealso>
     public static double LegHalfAngle(in CoilOutline coil)
     {
         if (coil.Shape != CoilShape.Keystone)

@@ -8,6 +8,6 @@ namespace SpecLint.Physics.Thermal;
 [StructLayout(LayoutKind.Auto)]
 public readonly record struct FluidProperties(double KinematicViscosity, double ThermalConductivity)
 {
-    /// <summary>Air near 40 C and sea level; fit to disc correlations of small machines (values from memory, as in the published-values file).</summary>
+    /// <summary>Air near 40 C and sea level; fit to disc correlations of small machines (values from memory).</summary>
     public static FluidProperties Air => new(1.6e-5, 0.0262);
 }

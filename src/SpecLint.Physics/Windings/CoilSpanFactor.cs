@@ -1,4 +1,5 @@
 using MathNet.Numerics;
+using SpecLint.Physics.Electrical;
 using SpecLint.Physics.Geometry;
 
 namespace SpecLint.Physics.Windings;
@@ -92,7 +93,7 @@ public static class CoilSpanFactor
         for (int node = 0; node < Nodes.Length; node++)
         {
             double radius = inner + 0.5 * coil.LegWidth * (1.0 + Nodes[node]);
-            sum += 0.5 * Weights[node] * radius * SpecialFunctions.BesselJ(1, waveNumber * radius);
+            sum += 0.5 * Weights[node] * radius * FirstKindBessel.J1(waveNumber * radius);
         }
 
         return 0.5 * Math.PI * sum / (inner + 0.5 * coil.LegWidth);

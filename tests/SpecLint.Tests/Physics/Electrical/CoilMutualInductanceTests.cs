@@ -139,6 +139,25 @@ public sealed class CoilMutualInductanceTests
     }
 
     [Fact]
+    public void Ring_TooManyCoils_IsNotANumber()
+    {
+        CoilInductances coils = CoilMutualInductance.Ring(Keystone, 1.0, IronPlanes.None, 721);
+
+        Assert.True(double.IsNaN(coils.Between(0, 1)));
+    }
+
+    [Fact]
+    public void Between_RingAndRow_CountSeparationsTheirWay()
+    {
+        CoilInductances ring = CoilMutualInductance.Ring(Keystone, 1.0, IronPlanes.None, 5);
+        CoilInductances row = CoilMutualInductance.Row(Rectangle, 1.0, IronPlanes.None, new CoilRow(5, 0.07));
+
+        Assert.Equal(ring.BySeparation[1], ring.Between(0, 4));
+        Assert.Equal(row.BySeparation[4], row.Between(4, 0));
+        Assert.Equal(ring.Self, ring.Between(3, 3));
+    }
+
+    [Fact]
     public void Ring_OneCoil_HasOnlySelf() => Assert.Single(CoilMutualInductance.Ring(Keystone, 1.0, IronPlanes.None, 1).BySeparation);
 
     // Wide bound: the budget of 2 ms is watched by the diagnostic message, a noisy machine must not fail the suite.

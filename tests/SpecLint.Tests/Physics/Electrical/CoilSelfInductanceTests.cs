@@ -30,7 +30,7 @@ public sealed class CoilSelfInductanceTests
         Assert.InRange(result.Error, 0.0, 1e-4 * result.Value);
     }
 
-    // Filament sums of the project's published-values file, section D-2: mean radius, axial length, radial depth, turns.
+    // Sums over 24 x 24 filaments and Wheeler, Proc. IRE 16, 1928, 1398: mean radius, axial length, radial depth, turns.
     [Theory]
     [InlineData(0.015, 0.010, 0.010, 100.0, 0.25490e-3)]
     [InlineData(0.030, 0.013, 0.020, 80.0, 0.36833e-3)]
@@ -140,6 +140,15 @@ public sealed class CoilSelfInductanceTests
     [Fact]
     public void Self_Unbuildable_IsNotANumber() =>
         Assert.True(double.IsNaN(CoilSelfInductance.Of(Keystone with { HoleLength = 0.4 }, 1.0, IronPlanes.None).Value));
+
+    [Fact]
+    public void Self_NegativeDistance_IsNotANumber() =>
+        Assert.True(double.IsNaN(CoilSelfInductance.Of(Keystone, 1.0, new IronPlanes(-0.001, 0.01)).Value));
+
+    // A leg of a thousandth of the coil's size is beyond the panels that the work limit allows: said so, not guessed.
+    [Fact]
+    public void Self_TooSlender_IsNotANumberInBoundedWork() =>
+        Assert.True(double.IsNaN(CoilSelfInductance.Of(Rectangle with { HoleLength = 1.0, HoleWidth = 1.0, LegWidth = 1e-4, Thickness = 1e-4 }, 1.0, IronPlanes.None).Value));
 
     [Fact]
     public void Self_Scaling_IsLengthTimesTurnsSquared() =>

@@ -2,7 +2,7 @@ namespace SpecLint.Tests.Physics.Electrical;
 
 public sealed class FilamentOracleTests
 {
-    // Maxwell's formula, values of the published-values file, section D-3: circles of 25 cm radius.
+    // Maxwell, Treatise, art. 701, values worked by hand: circles of 25 cm radius.
     [Theory]
     [InlineData(0.04, 606.07e-9)]
     [InlineData(0.10, 337.68e-9)]

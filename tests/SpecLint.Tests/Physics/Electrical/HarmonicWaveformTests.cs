@@ -57,7 +57,6 @@ public sealed class HarmonicWaveformTests
         Assert.Equal(dense, wave.ShareBelow(0.05), 1.5e-3);
     }, iter: 30);
 
-    // Flat waveform with a notch: a coil of narrow span shows a dead time that a sine has not.
     [Fact]
     public void ShareBelow_ZeroWaveform_IsNotANumber() =>
         Assert.True(double.IsNaN(new HarmonicWaveform { Amplitudes = [Complex.Zero] }.ShareBelow(0.05)));

@@ -9,7 +9,7 @@ public sealed class PhaseEmfTests
 {
     private static readonly ImmutableArray<double> Psi = [1.0e-3, -0.12e-3, 0.03e-3, 0.015e-3, -0.002e-3];
 
-    // A-5 of the published-values file: 200 turns, flux 7.9e-5 Wb, 12 Hz: 1.19 V peak, 0.84 V rms a coil; three in series 2.5 V.
+    // Public design note of a desk machine, its own estimates: 200 turns, flux 7.9e-5 Wb, 12 Hz: 1.19 V peak, 0.84 V rms a coil; three in series 2.5 V.
     [Fact]
     public void Coil_PublishedDeskMachine_GivesItsVoltage()
     {

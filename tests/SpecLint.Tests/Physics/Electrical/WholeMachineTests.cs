@@ -52,7 +52,7 @@ public sealed class WholeMachineTests
         Assert.Equal(copperPower, density * density * 1.7241e-8 * WindingResistance.CoilVolume(wire), 1e-9);
     }
 
-    // Published ferrite machine (section A-1): 100 turns, mean turn 0.25 m, two coils in series, about 2 mH a phase inferred from its
+    // Ferrite machine of H. Piggott, The Permanent Magnet Generator, 2001: 100 turns, mean turn 0.25 m, two coils in series, about 2 mH a phase inferred from its
     // output. The outline is assumed: 50 mm magnets, 20 mm leg and stator; iron 21 mm behind, over 20 mm of ferrite and 1 mm of air.
     [Fact]
     public void FerriteMachine_Inductance_IsAboutTheInferredOne()

@@ -7,7 +7,7 @@ public sealed class WindingResistanceTests
 {
     private const double Cold = 293.15;
 
-    // Published-values file, D-4 and table 01: bare diameters in mm.
+    // ASTM B258 diameters in mm, as wire tables print them.
     [Theory]
     [InlineData(13, 1.828)]
     [InlineData(14, 1.628)]
@@ -25,7 +25,7 @@ public sealed class WindingResistanceTests
     public void Coil_Awg28_IsPublishedResistancePerMetre() =>
         Assert.Equal(0.2129, WindingResistance.OfCoil(Wire(WireGauge.DiameterOfAwg(28), 1, 1.0, 1.0), Cold), 6e-5);
 
-    // D-4: 25 m of 1.7 mm is 0.1899 ohm at 20 C, 0.2496 at 100 C; A-1: six such coils weigh 3.04 kg (density 8930 behind that figure, 8890 here: 0.5 %).
+    // 25 m of 1.7 mm is 0.1899 ohm at 20 C, 0.2496 at 100 C by hand; six such coils weigh 3.04 kg (density 8930 behind that figure, 8890 here: 0.5 %).
     [Fact]
     public void Coil_HundredTurnsOfQuarterMetre_MatchesPublished()
     {
@@ -37,7 +37,7 @@ public sealed class WindingResistanceTests
         Assert.Equal(0.380, WindingResistance.OfPhase(WindingResistance.OfCoil(wire, Cold), 2, 1), 5e-4);
     }
 
-    // 35 turns of two strands become 70 of one: phase resistance times four.
+    // A builder's 12 V and 24 V windings: 35 turns of two strands become 70 of one: phase resistance times four.
     [Fact]
     public void Coil_TwiceTheTurnsHalfTheStrands_IsFourfold()
     {
@@ -47,7 +47,7 @@ public sealed class WindingResistanceTests
         Assert.Equal(4.0, twentyFour / twelve, 1e-12);
     }
 
-    // 0.2 ohm from 50 turns of 1 mm means a mean turn of 0.182 m; A-5: 200 turns of AWG 28, 80 mm, 3.4 ohm.
+    // Two public records of small machines: 0.2 ohm from 50 turns of 1 mm means a mean turn of 0.182 m; 200 turns of AWG 28, 80 mm, 3.4 ohm.
     [Fact]
     public void Coil_PublishedMachines_Agree()
     {
@@ -66,7 +66,7 @@ public sealed class WindingResistanceTests
     public void CurrentDensity_SharesBetweenPathsAndStrands() =>
         Assert.Equal(12.0 / (2.0 * 3.0 * 0.25 * Math.PI * 1e-6), WindingResistance.CurrentDensity(12.0, 2, Wire(1e-3, 3, 1.0, 1.0)), 1e-3);
 
-    // E: 9.35 mm at 50 Hz with 1.724e-8.
+    // By hand: 9.35 mm at 50 Hz with 1.724e-8.
     [Fact]
     public void SkinDepth_FiftyHertz_IsPublished() =>
         Assert.Equal(9.35e-3, WindingResistance.SkinDepth(1.724e-8, 100.0 * Math.PI), 6e-6);

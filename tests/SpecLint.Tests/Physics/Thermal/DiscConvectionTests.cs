@@ -7,7 +7,7 @@ public sealed class DiscConvectionTests
 {
     private const double Rpm = Math.PI / 30.0;
 
-    // Published-values file, F-1.
+    // Cobb and Saunders 1956, worked by hand: 150 mm at 300 rpm, 200 mm at 200 rpm.
     [Theory]
     [InlineData(0.150, 300.0, 44180.0, 75.7, 13.2)]
     [InlineData(0.200, 200.0, 52360.0, 82.4, 10.8)]
@@ -20,7 +20,7 @@ public sealed class DiscConvectionTests
         Assert.Equal(coefficient, result.Coefficient, 0.06);
     }
 
-    // F-2: Re 44 180 at gap ratios 0.01, 0.02 and 0.08.
+    // Boutarfa and Harmand 2005, worked by hand: Re 44 180 at gap ratios 0.01, 0.02 and 0.08.
     [Theory]
     [InlineData(0.01, 228.7)]
     [InlineData(0.02, 105.6)]

@@ -15,7 +15,7 @@ public sealed class CoilSpanFactorTests
         PitchRadius = 0.115,
     };
 
-    // Section B-3 of the published-values file: the real coil width decides; 9 coils, 12 poles reach 0.88 to 0.90 at best.
+    // A coreless coil's real width decides: near the product of pitch factor and spread of a straight leg.
     [Fact]
     public void DiscCoil_Keystone_IsPitchTimesSpread()
     {

@@ -5,7 +5,7 @@ namespace SpecLint.Tests.Physics.Windings;
 
 public sealed class StarOfSlotsTests
 {
-    // Fundamental factors of the published-values file, section B-3: tooth coils.
+    // Fundamental factors of tooth coils as any text on fractional-slot windings tabulates them.
     [Theory]
     [InlineData(12, 8, 0.8660)]
     [InlineData(9, 12, 0.8660)]
@@ -25,7 +25,7 @@ public sealed class StarOfSlotsTests
         Assert.Equal(expected, factor, 5e-5);
     }
 
-    // A-6 of the published-values file: 12 coils, 10 poles, pairs 15 degrees off the resultant, cos 15 = 0.9659.
+    // Public practitioner's note on 12 coils and 10 poles: pairs 15 degrees off the resultant, cos 15 = 0.9659.
     [Fact]
     public void Distribution_TwelveCoilsTenPoles_LosesCosineOfFifteenDegrees() =>
         Assert.Equal(Math.Cos(Math.PI / 12.0), DistributionFactor.Of(StarOfSlots.EquallySpaced(12, 5, 3), 0, 1), 1e-12);

@@ -44,7 +44,7 @@ public sealed class WireLayTests
             Assert.True(WireLay.CopperFill(space, WireLay.NestedCapacity(space)) <= 0.5 * Math.PI / Math.Sqrt(3.0) + 1e-9);
         });
 
-    // Table 06: 1.000 mm grade 2, overall 1.094 mm: at best 0.656 square and 0.758 nested, reached in a large section.
+    // Wire of 1.000 mm grade 2, overall 1.094 mm: at best 0.656 square and 0.758 nested, reached in a large section.
     [Fact]
     public void Fill_LargeSection_TendsToTableLimits()
     {
