@@ -15,6 +15,10 @@ internal static class CoilWeightedDemagnetisation
     private const int Nodes = WaveNumberGrid.NodesPerBlock;
     private const int Radii = MagnetTransform.InteriorNodes;
     private const double Tolerance = 1e-4;
+
+    /// <summary>Below this share of its absolute integral the coil's field hardly drives the magnet, and the plain mean is returned.</summary>
+    private const double LeastShare = 0.1;
+
     private static readonly InteriorSamples.Counts Counts = new(6, 4, 6);
 
     /// <summary>Computes the factor.</summary>
@@ -40,6 +44,8 @@ internal static class CoilWeightedDemagnetisation
         double[] radii = magnets.InteriorRadii();
         double driven = 0.0;
         double opposed = 0.0;
+        double size = 0.0;
+        double mean = 0.0;
         Interpolant interpolant = new() { Radii = radii, Weights = stackalloc double[Radii], Slopes = stackalloc double[Radii] };
         for (int i = 0; i < samples.Length; i++)
         {
@@ -48,10 +54,12 @@ internal static class CoilWeightedDemagnetisation
             FieldVector h = CoilField(magnets.Grid, s, interpolant, potential.AsSpan(q * Radii, Radii), normal.AsSpan(q * Radii, Radii));
             FieldVector m = field.At(s.X, s.Y, s.Z);
             driven += s.Weight * h.Z;
+            size += s.Weight * Math.Abs(h.Z);
+            mean -= s.Weight * m.Z;
             opposed -= s.Weight * ((m.X * h.X) + (m.Y * h.Y) + (m.Z * h.Z));
         }
 
-        return opposed / driven;
+        return Math.Abs(driven) > LeastShare * size ? opposed / driven : mean;
     }
 
     /// <summary>Potential and normal field of the coil's fundamental at the interior radii, level by level.</summary>

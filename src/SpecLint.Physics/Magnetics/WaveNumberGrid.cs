@@ -67,6 +67,10 @@ public readonly record struct WaveNumberGrid
         };
     }
 
+    /// <summary>The same grid with panels half as wide, to check a result's error estimate.</summary>
+    /// <returns>The finer grid.</returns>
+    public WaveNumberGrid Refined() => this with { PanelWidth = 0.5 * PanelWidth };
+
     /// <summary>Fills the nodes and weights of one block.</summary>
     /// <param name="block">Block number from zero.</param>
     /// <param name="nodes">Wave numbers [1/m], length <see cref="NodesPerBlock"/>.</param>
