@@ -7,13 +7,16 @@ namespace SpecLint.Spec.Documents;
 /// <summary>Reads a spec: text, schema, units and tolerances, keys of its topology, and sizes that contradict each other.</summary>
 public static class SpecReader
 {
+    /// <summary>A long spec has some hundred values; the check of a stranger's text must not take seconds.</summary>
+    private static readonly YamlLimits Limits = YamlLimits.Default with { Nodes = 10_000 };
+
     /// <summary>Reads a spec. Whatever the bytes are, the result holds every leaf that could be read and every fault.</summary>
     /// <param name="path">Path as given on the command line, with <c>/</c> between segments.</param>
     /// <param name="bytes">The bytes of the file.</param>
     public static SpecDocument Read(string path, ReadOnlySpan<byte> bytes)
     {
         _ = SchemaCheck.Prepare();
-        var yaml = YamlReader.Read(bytes, YamlLimits.Default);
+        var yaml = YamlReader.Read(bytes, Limits);
         var faults = new FaultCollector();
         foreach (var fault in yaml.Faults)
         {
@@ -24,8 +27,13 @@ public static class SpecReader
         {
             if (yaml.Root is not null)
             {
-                string found = yaml.Root is YamlSequence ? "a list" : "a single value";
-                faults.Add(new SpecFault("", $"the text is {found}; a mapping with keys such as machine and magnets is expected", yaml.Root.Region));
+                var (found, place) = yaml.Root switch
+                {
+                    YamlSequence list => ("is a list", list.Region),
+                    YamlScalar scalar when CoreSchema.IsNull(scalar) => ("holds no keys", Region.Beginning),
+                    _ => ("is a single value", yaml.Root.Region),
+                };
+                faults.Add(new SpecFault("", $"the text {found}; a mapping with keys such as machine and magnets is expected", place));
             }
 
             return new SpecDocument(path, yaml.Text, [], [], faults.InOrder());

@@ -54,6 +54,8 @@ internal sealed class SpecTree
         var site = value.AliasSite ?? alias;
         switch (value)
         {
+            case YamlScalar { IsBroken: true }:
+                break;
             case YamlScalar scalar when node.TakesScalar:
                 ReadLeaf(node, key, keyRegion, scalar with { AliasSite = site });
                 break;

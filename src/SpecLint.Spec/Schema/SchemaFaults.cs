@@ -18,10 +18,17 @@ internal sealed class SchemaFaults(TokenTree tree)
         var guessed = new HashSet<string>(StringComparer.Ordinal);
         foreach (var error in errors.SelectMany(Causes))
         {
+            if (_faults.Count >= FaultCollector.MostFaults)
+            {
+                break;
+            }
+
             if (error.Kind == ValidationErrorKind.PropertyRequired)
             {
-                var parent = tree.OriginOf(error.Token);
-                missing.Add((parent?.Key ?? "", error.Property ?? "", parent?.KeyRegion ?? Region.Beginning));
+                if (tree.OriginOf(error.Token) is { Node: YamlMapping } parent)
+                {
+                    missing.Add((parent.Key, error.Property ?? "", parent.KeyRegion));
+                }
             }
             else if (error.Kind == ValidationErrorKind.NoAdditionalPropertiesAllowed)
             {
@@ -115,7 +122,7 @@ internal sealed class SchemaFaults(TokenTree tree)
 
     private void Wrong(ValidationError error)
     {
-        if (tree.OriginOf(error.Token) is not { } origin || origin.Schema is not { } node)
+        if (tree.OriginOf(error.Token) is not { } origin || origin.Schema is not { } node || origin.Node is YamlScalar { IsBroken: true })
         {
             return;
         }

@@ -5,6 +5,9 @@ namespace SpecLint.Spec.Units;
 /// <summary>A quantity taken apart: nominal value, tolerance, and the unit text of each; nothing is looked up yet.</summary>
 internal readonly ref struct QuantityText
 {
+    /// <summary>Beyond any unit's use, and within the decimal numbers that the unit library keeps some quantities in.</summary>
+    private const double LargestNumber = 1e20;
+
     internal required double Nominal { get; init; }
 
     internal required ReadOnlySpan<char> Unit { get; init; }
@@ -135,7 +138,7 @@ internal readonly ref struct QuantityText
             return false;
         }
 
-        bool isRead = double.TryParse(text[..at], NumberStyles.Float, CultureInfo.InvariantCulture, out value) && double.IsFinite(value);
+        bool isRead = double.TryParse(text[..at], NumberStyles.Float, CultureInfo.InvariantCulture, out value) && Math.Abs(value) <= LargestNumber;
         problem = isRead ? "" : $"is {Shown(text)}, more than any size; a finite number is expected";
         rest = rest.TrimStart();
         return isRead;

@@ -30,7 +30,7 @@ public sealed class UnitEntry
 
     /// <summary>A value on this scale in coherent SI.</summary>
     /// <param name="value">Value in this unit.</param>
-    public double ToSi(double value) => _toSi(value);
+    public double ToSi(double value) => double.IsFinite(value) ? _toSi(value) : value;
 
     /// <summary>A difference in this unit in coherent SI: the scale's offset left out.</summary>
     /// <param name="difference">Difference in this unit.</param>

@@ -14,6 +14,9 @@ internal static class UnitRows
     /// <summary>One volt at one revolution per minute, in V·s/rad: 60/(2π).</summary>
     private const double SecondsPerRadianOfOneRpm = 60 / (2 * Math.PI);
 
+    /// <summary>2π/60; the unit library's own factor for rpm is rounded to ten digits, as is its ampere-hour.</summary>
+    private const double RadiansPerSecondOfOneRpm = 2 * Math.PI / 60;
+
     internal static (UnitEntry Entry, string[] Spellings)[] All { get; } =
     [
         (new("m", "a length", Dimensions.Length, static v => Length.FromMeters(v).Meters), ["m", "metre", "meter"]),
@@ -90,9 +93,9 @@ internal static class UnitRows
         (new("J/m³", "an energy density", Dimensions.Pressure, static v => EnergyDensity.FromJoulesPerCubicMeter(v).JoulesPerCubicMeter), ["J/m3"]),
         (new("kJ/m³", "an energy density", Dimensions.Pressure, static v => EnergyDensity.FromKilojoulesPerCubicMeter(v).JoulesPerCubicMeter), ["kJ/m3"]),
         (new("MGOe", "an energy density", Dimensions.Pressure, static v => v * JoulesPerCubicMetrePerMegagaussOersted), ["MGOe"]),
-        (new("rpm", "a rotational speed", Dimensions.Rate, static v => RotationalSpeed.FromRevolutionsPerMinute(v).RadiansPerSecond), ["rpm", "r/min", "rev/min", "1/min", "min-1", "/min", "U/min"]),
+        (new("rpm", "a rotational speed", Dimensions.Rate, static v => RotationalSpeed.FromRadiansPerSecond(v * RadiansPerSecondOfOneRpm).RadiansPerSecond), ["rpm", "r/min", "rev/min", "1/min", "min-1", "/min", "U/min"]),
         (new("rad/s", "a rotational speed", Dimensions.Rate, static v => RotationalSpeed.FromRadiansPerSecond(v).RadiansPerSecond), ["rad/s", "rads-1"]),
-        (new("r/s", "a rotational speed", Dimensions.Rate, static v => RotationalSpeed.FromRevolutionsPerSecond(v).RadiansPerSecond), ["r/s", "rps", "rev/s"]),
+        (new("r/s", "a rotational speed", Dimensions.Rate, static v => RotationalSpeed.FromRadiansPerSecond(v * 60 * RadiansPerSecondOfOneRpm).RadiansPerSecond), ["r/s", "rps", "rev/s"]),
         (new("Hz", "a frequency", Dimensions.Rate, static v => Frequency.FromHertz(v).Hertz), ["Hz"]),
         (new("kHz", "a frequency", Dimensions.Rate, static v => Frequency.FromKilohertz(v).Hertz), ["kHz"]),
         (new("MHz", "a frequency", Dimensions.Rate, static v => Frequency.FromMegahertz(v).Hertz), ["MHz"]),
@@ -112,8 +115,8 @@ internal static class UnitRows
         (new("kg/m³", "a density", Dimensions.Density, static v => Density.FromKilogramsPerCubicMeter(v).KilogramsPerCubicMeter), ["kg/m3"]),
         (new("g/cm³", "a density", Dimensions.Density, static v => Density.FromGramsPerCubicCentimeter(v).KilogramsPerCubicMeter), ["g/cm3", "g/cc"]),
         (new("kg/l", "a density", Dimensions.Density, static v => Density.FromKilogramsPerLiter(v).KilogramsPerCubicMeter), ["kg/l", "kg/L"]),
-        (new("A·h", "a charge", Dimensions.Charge, static v => ElectricCharge.FromAmpereHours(v).Coulombs), ["Ah"]),
-        (new("mA·h", "a charge", Dimensions.Charge, static v => ElectricCharge.FromMilliampereHours(v).Coulombs), ["mAh"]),
+        (new("A·h", "a charge", Dimensions.Charge, static v => ElectricCharge.FromCoulombs(v * 3600).Coulombs), ["Ah"]),
+        (new("mA·h", "a charge", Dimensions.Charge, static v => ElectricCharge.FromCoulombs(v * 3.6).Coulombs), ["mAh"]),
         (new("A·s", "a charge", Dimensions.Charge, static v => ElectricCharge.FromCoulombs(v).Coulombs), ["As", "coulomb"]),
         (new("H", "an inductance", Dimensions.Inductance, static v => ElectricInductance.FromHenries(v).Henries), ["H"]),
         (new("mH", "an inductance", Dimensions.Inductance, static v => ElectricInductance.FromMillihenries(v).Henries), ["mH"]),

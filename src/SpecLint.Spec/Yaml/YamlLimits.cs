@@ -14,4 +14,7 @@ public sealed record YamlLimits
 
     /// <summary>Largest number of values, each alias counted with all that it repeats.</summary>
     public int Nodes { get; init; } = 50_000;
+
+    /// <summary>Most faults that are told before reading stops.</summary>
+    public int Faults { get; init; } = 100;
 }

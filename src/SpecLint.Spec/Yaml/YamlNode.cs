@@ -14,7 +14,11 @@ public abstract record YamlNode(Region Region)
 /// <param name="Region">Where it stands, quotes included.</param>
 /// <param name="Text">The text after quotes and escapes are resolved.</param>
 /// <param name="IsPlain">True when unquoted, so that the core schema may read it as a number, a boolean or null.</param>
-public sealed record YamlScalar(Region Region, string Text, bool IsPlain) : YamlNode(Region);
+public sealed record YamlScalar(Region Region, string Text, bool IsPlain) : YamlNode(Region)
+{
+    /// <summary>True for the stand-in of an alias that leads nowhere; its fault has been told.</summary>
+    internal bool IsBroken { get; init; }
+}
 
 /// <summary>A mapping with its entries in order of appearance; keys are scalars and unique.</summary>
 /// <param name="Region">Where it stands.</param>

@@ -37,11 +37,12 @@ public static class YamlReader
     {
         var faults = new List<YamlFault>();
         YamlNode? root = null;
+        var parser = new Parser(new StringReader(text));
         try
         {
-            root = new YamlTreeBuilder(new Parser(new StringReader(text)), limits, faults).ReadDocument();
+            root = new YamlTreeBuilder(parser, limits, faults).ReadDocument();
         }
-        catch (YamlLimitException limit)
+        catch (YamlStopException limit)
         {
             faults.Add(limit.Fault);
         }
@@ -51,7 +52,9 @@ public static class YamlReader
         }
         catch (InvalidOperationException)
         {
-            faults.Add(new YamlFault("the brackets, braces or commas of this text do not fit together", TextDecoder.PlaceAt(text, -1)));
+            // The library gives up without a place on some unbalanced text; the last part it understood is the nearest one.
+            var place = parser.Current is { } last ? new Region((int)last.End.Line, (int)last.End.Column, (int)last.End.Line, (int)last.End.Column + 1) : Region.Beginning;
+            faults.Add(new YamlFault("the brackets, braces or commas do not fit together from here on", place));
         }
 
         return new YamlReadResult(text, root, [.. faults.OrderBy(f => f.Region)]);

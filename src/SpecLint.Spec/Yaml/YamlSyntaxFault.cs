@@ -9,52 +9,76 @@ internal static class YamlSyntaxFault
     {
         int line = Math.Max(1, (int)syntax.Start.Line);
         int column = Math.Max(1, (int)syntax.Start.Column);
-        foreach (int candidate in (ReadOnlySpan<int>)[line, line - 1, line + 1, (int)syntax.End.Line])
+        string said = syntax.Message;
+        if (FirstTab(text, line, Has(said, "tab") ? int.MaxValue : line + 1) is { } tab)
         {
-            if (TabColumn(LineOf(text, candidate)) is int tab)
-            {
-                return new YamlFault("a tab stands in the indentation; YAML allows only spaces there", new Region(candidate, tab, candidate, tab + 1));
-            }
+            return new YamlFault("a tab stands in the indentation; YAML allows only spaces there", tab);
         }
 
-        string said = syntax.Message;
-        string message =
-            Has(said, "found undefined tag handle") ? "this tag is not known; plain values are expected" :
-            Has(said, "anchor") || Has(said, "alias") ? "an anchor '&name' or alias '*name' is not complete here" :
-            Has(said, "cannot start any token") ? "this character cannot begin a value; put the text in quotes" :
-            Has(said, "simple key") ? "a ':' is missing after this key, or the line is indented wrongly" :
-            Has(said, "quoted scalar") || Has(said, "end of stream") && Has(said, "scalar") ? "the quotes opened here are not closed" :
-            Has(said, "mapping values are not allowed") ? "a second ':' stands on this line, or the line is indented wrongly; put text that holds ': ' in quotes" :
-            Has(said, "flow sequence") ? "the list '[' opened here is not closed, or a ',' is missing" :
-            Has(said, "flow mapping") ? "the mapping '{' opened here is not closed, or a ',' is missing" :
-            Has(said, "block mapping") ? "this line does not fit the keys above it; check its indentation" :
-            Has(said, "block collection") || Has(said, "block sequence") || Has(said, "block entr") ? "this line does not fit the list above it; check its indentation and '-'" :
-            Has(said, "escape") ? "this escape is not known in a quoted text; use single quotes" :
-            Has(said, "directive") || Has(said, "document start") ? "a directive '%' is not complete here, or text stands outside the document" :
-            "this is not YAML; check indentation, quotes and brackets near here";
-        return new YamlFault(message, new Region(line, column, line, column + 1));
+        if (Has(said, "flow mapping") && AnchorBefore(text, line, column) is { } anchor)
+        {
+            // The library stops at the ',' after an anchored scalar between braces, though YAML allows it.
+            return new YamlFault("an anchor '&name' on a single value between '{' and '}' cannot be read here; write this mapping with one key a line", anchor);
+        }
+
+        return new YamlFault(Sentence(said), new Region(line, column, line, column + 1));
     }
+
+    private static string Sentence(string said) =>
+        Has(said, "undefined tag handle") ? "this tag is not known; plain values are expected" :
+        Has(said, "anchor or alias") ? "the name of an anchor '&name' or alias '*name' is missing here" :
+        Has(said, "cannot start any token") ? "this character cannot begin a value; put the text in quotes" :
+        Has(said, "unknown escape") ? "this escape is not known in a quoted text; use single quotes" :
+        Has(said, "quoted scalar") ? "the quotes opened here are not closed" :
+        Has(said, "invalid mapping") || Has(said, "mapping values are not allowed") ? "a ':' stands here inside a value; check this line's indentation, or put text that holds ': ' in quotes" :
+        Has(said, "simple key") ? "a ':' is missing after this key, or the line is indented wrongly" :
+        Has(said, "flow sequence") ? "the list '[' is not closed here, or a ',' is missing" :
+        Has(said, "flow mapping") ? "the mapping '{' is not closed here, or a ',' is missing" :
+        Has(said, "block mapping") ? "this does not fit the keys above it; check indentation, quotes and brackets" :
+        Has(said, "block collection") ? "this line does not fit the list above it; check its indentation and '-'" :
+        Has(said, "Block sequence entries") ? "a list item '-' stands here after a key; begin it on a line of its own" :
+        Has(said, "node content") ? "a value is expected here" :
+        Has(said, "document end") ? "text stands here after the end of the value; check quotes and brackets" :
+        Has(said, "incompatible") || Has(said, "directive") ? "the directive '%' here is not one of YAML 1.2" :
+        "this is not YAML; check indentation, quotes and brackets near here";
 
     private static bool Has(string text, string part) => text.Contains(part, StringComparison.OrdinalIgnoreCase);
 
-    private static int? TabColumn(ReadOnlySpan<char> line)
+    private static Region? AnchorBefore(string text, int line, int column)
     {
-        int content = line.IndexOfAnyExcept(' ', '\t', '-');
-        int tab = (content < 0 ? line : line[..content]).IndexOf('\t');
-        return tab < 0 || content < 0 ? null : tab + 1;
-    }
-
-    private static ReadOnlySpan<char> LineOf(string text, int line)
-    {
-        int current = 1;
+        int current = 0;
         foreach (var piece in text.AsSpan().EnumerateLines())
         {
-            if (current++ == line)
+            if (++current == line)
             {
-                return piece;
+                int at = piece[..Math.Min(piece.Length, column - 1)].LastIndexOf(" &");
+                return at < 0 ? null : new Region(line, at + 2, line, at + 3);
             }
         }
 
-        return default;
+        return null;
+    }
+
+    /// <summary>The first tab that stands in the indentation of some lines; blank lines do not count.</summary>
+    private static Region? FirstTab(string text, int from, int to)
+    {
+        int line = 0;
+        foreach (var piece in text.AsSpan().EnumerateLines())
+        {
+            line++;
+            int content = piece.IndexOfAnyExcept(' ', '\t', '-');
+            int tab = content < 0 ? -1 : piece[..content].IndexOf('\t');
+            if (line >= from && tab >= 0)
+            {
+                return new Region(line, tab + 1, line, tab + 2);
+            }
+
+            if (line >= to)
+            {
+                break;
+            }
+        }
+
+        return null;
     }
 }

@@ -17,7 +17,7 @@ internal sealed class YamlTreeBuilder(IParser parser, YamlLimits limits, List<Ya
         parser.MoveNext();
         if (parser.Current is not DocumentStart)
         {
-            faults.Add(new YamlFault("the text holds no document; the keys of a spec or rulebook are expected", Region.Beginning));
+            Tell(new YamlFault("the text holds no document; the keys of a spec or rulebook are expected", Region.Beginning));
             return null;
         }
 
@@ -28,7 +28,7 @@ internal sealed class YamlTreeBuilder(IParser parser, YamlLimits limits, List<Ya
         {
             if (parser.Current is DocumentStart second)
             {
-                faults.Add(new YamlFault("a second document begins here; one document a file is expected", PlaceOf(second)));
+                Tell(new YamlFault("a second document begins here; one document a file is expected", PlaceOf(second)));
                 break;
             }
 
@@ -48,7 +48,7 @@ internal sealed class YamlTreeBuilder(IParser parser, YamlLimits limits, List<Ya
 
         if (depth > limits.Depth)
         {
-            throw new YamlLimitException(new YamlFault(string.Create(CultureInfo.InvariantCulture, $"mappings and lists stand more than {limits.Depth} deep here"), PlaceOf(start)));
+            throw new YamlStopException(new YamlFault(string.Create(CultureInfo.InvariantCulture, $"mappings and lists stand more than {limits.Depth} deep here"), PlaceOf(start)));
         }
 
         if (start is AnchorAlias alias)
@@ -56,15 +56,21 @@ internal sealed class YamlTreeBuilder(IParser parser, YamlLimits limits, List<Ya
             return Resolve(alias);
         }
 
+        // The library ends some malformed flow text where a value should begin.
+        if (start is not NodeEvent named)
+        {
+            throw new YamlStopException(new YamlFault("a value is expected here", PlaceOf(start)));
+        }
+
         int before = _size - 1;
         string? anchor = null;
-        if (start is NodeEvent { Anchor.IsEmpty: false } named)
+        if (!named.Anchor.IsEmpty)
         {
             anchor = named.Anchor.Value;
             _anchors[anchor] = (null, 0);
         }
 
-        CheckTag((NodeEvent)start);
+        CheckTag(named);
         YamlNode node = start switch
         {
             Scalar scalar => ReadScalar(scalar),
@@ -114,7 +120,7 @@ internal sealed class YamlTreeBuilder(IParser parser, YamlLimits limits, List<Ya
             var value = ReadNode(depth + 1);
             if (key is not YamlScalar name)
             {
-                faults.Add(new YamlFault("a list or mapping stands where the name of a key is expected", key.Region));
+                Tell(new YamlFault("a list or mapping stands where the name of a key is expected", key.Region));
             }
             else if (name.IsPlain && string.Equals(name.Text, "<<", StringComparison.Ordinal))
             {
@@ -122,7 +128,7 @@ internal sealed class YamlTreeBuilder(IParser parser, YamlLimits limits, List<Ya
             }
             else if (!places.TryAdd(name.Text, name.Region))
             {
-                faults.Add(new YamlFault($"the key '{Shown(name.Text)}' stands twice in one mapping", name.Region)
+                Tell(new YamlFault($"the key '{Shown(name.Text)}' stands twice in one mapping", name.Region)
                 {
                     Related = places[name.Text],
                     RelatedMessage = "the first of the two",
@@ -150,7 +156,7 @@ internal sealed class YamlTreeBuilder(IParser parser, YamlLimits limits, List<Ya
         {
             if (source is not YamlMapping mapping)
             {
-                faults.Add(new YamlFault("the merge key '<<' takes a mapping, or a list of mappings, by alias", key.Region));
+                Tell(new YamlFault("the merge key '<<' takes a mapping, or a list of mappings, by alias", key.Region));
                 return;
             }
 
@@ -171,13 +177,13 @@ internal sealed class YamlTreeBuilder(IParser parser, YamlLimits limits, List<Ya
         parser.MoveNext();
         if (!_anchors.TryGetValue(name, out var target))
         {
-            faults.Add(new YamlFault($"the alias '*{Shown(name)}' names no anchor above it", site));
+            Tell(new YamlFault($"the alias '*{Shown(name)}' names no anchor above it", site));
             return Nothing(site)[0];
         }
 
         if (target.Node is null)
         {
-            faults.Add(new YamlFault($"the alias '*{Shown(name)}' stands inside its own anchor", site));
+            Tell(new YamlFault($"the alias '*{Shown(name)}' stands inside its own anchor", site));
             return Nothing(site)[0];
         }
 
@@ -190,20 +196,30 @@ internal sealed class YamlTreeBuilder(IParser parser, YamlLimits limits, List<Ya
         return target.Node with { AliasSite = site };
     }
 
-    private static YamlNode[] Nothing(Region site) => [new YamlScalar(site, "", IsPlain: true)];
+    private static YamlNode[] Nothing(Region site) => [new YamlScalar(site, "", IsPlain: true) { IsBroken = true }];
+
+    private void Tell(YamlFault fault)
+    {
+        if (faults.Count >= limits.Faults)
+        {
+            throw new YamlStopException(new YamlFault(string.Create(CultureInfo.InvariantCulture, $"more than {limits.Faults} faults of syntax; reading stops here"), fault.Region));
+        }
+
+        faults.Add(fault);
+    }
 
     private void CheckTag(NodeEvent start)
     {
         string tag = TagText(start);
         if (tag.Length > 1 && tag is not ("tag:yaml.org,2002:str" or "tag:yaml.org,2002:map" or "tag:yaml.org,2002:seq"))
         {
-            faults.Add(new YamlFault($"the tag '{Shown(tag)}' stands before this value; plain values are expected", PlaceOf(start)));
+            Tell(new YamlFault($"the tag '{Shown(tag)}' stands before this value; plain values are expected", PlaceOf(start)));
         }
     }
 
     private static string TagText(NodeEvent start) => start.Tag.IsEmpty ? "" : start.Tag.IsNonSpecific ? "!" : start.Tag.Value;
 
-    private YamlLimitException TooMany(Region place) =>
+    private YamlStopException TooMany(Region place) =>
         new(new YamlFault(string.Create(CultureInfo.InvariantCulture, $"the text holds more than {limits.Nodes} values, aliases counted with what they repeat"), place));
 
     private static string Shown(string text) => text.Length <= 60 ? text : text[..60] + "…";
@@ -216,7 +232,8 @@ internal sealed class YamlTreeBuilder(IParser parser, YamlLimits limits, List<Ya
         bool isFlow = start is MappingStart { Style: MappingStyle.Flow } or SequenceStart { Style: SequenceStyle.Flow };
         if (isFlow || last is null)
         {
-            return RegionOf(start.Start, isFlow ? end.End : start.End);
+            // The closing bracket is one character; the library's end mark leaves it out.
+            return isFlow ? RegionOf(start.Start, end.Start) with { EndColumn = (int)end.Start.Column + 1 } : RegionOf(start.Start, start.End);
         }
 
         // A block container's end mark is where the next token begins; its last value is where it really ends.

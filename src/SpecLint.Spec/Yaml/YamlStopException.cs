@@ -1,7 +1,7 @@
 namespace SpecLint.Spec.Yaml;
 
 /// <summary>Ends the reading of a text at once; never leaves the reader.</summary>
-internal sealed class YamlLimitException(YamlFault fault) : Exception(fault.Message)
+internal sealed class YamlStopException(YamlFault fault) : Exception(fault.Message)
 {
     internal YamlFault Fault { get; } = fault;
 }
