@@ -28,12 +28,12 @@ internal sealed class ExpressionBinder(string text, ExpressionScope scope)
     public static ImmutableArray<string> FunctionNames { get; } =
         ["min", "max", "abs", "sqrt", "gcd", "lcm", "choose", "stated", "known", "number-of", "table"];
 
-    public List<string> Figures { get; } = [];
+    private NameBinder? _names;
 
-    public List<string> Keys { get; } = [];
+    /// <summary>Resolves figures and keys.</summary>
+    public NameBinder Names => _names ??= new NameBinder(scope.Figures, Fail);
 
-    public List<string> StatedKeys { get; } = [];
-
+    /// <summary>The first fault; null when there is none.</summary>
     public ExpressionFault? Fault { get; private set; }
 
     public Typed? Fail(string message, int start, int length)
@@ -49,70 +49,6 @@ internal sealed class ExpressionBinder(string text, ExpressionScope scope)
         IsZero = token.Number == 0 && token.Unit.Length == 0,
         IsPoint = token.IsPoint,
     };
-
-    public Typed? Name(Token token)
-    {
-        int end = token.Start + token.Length;
-        if (scope.Figures.Find(token.Text) is { } figure)
-        {
-            Add(Figures, figure.Name);
-            return new Typed(new FigureNode(figure.Name), TypedKind.Number, token.Start, end)
-            {
-                Dimension = figure.Dimension,
-                Unit = figure.DisplayUnit,
-            };
-        }
-
-        if (ExpressionScope.FindKey(token.Text) is not { } key)
-        {
-            return UnknownName(token);
-        }
-
-        Add(Keys, key.Key);
-        return key.Kind switch
-        {
-            NamedKeyKind.Number => new Typed(new KeyNumberNode(key.Key, key.Dimension), TypedKind.Number, token.Start, end)
-            {
-                Dimension = key.Dimension,
-                Unit = key.DisplayUnit,
-            },
-            NamedKeyKind.Text => new Typed(new KeyTextNode(key.Key), TypedKind.Text, token.Start, end) { Words = key.Words },
-            NamedKeyKind.Flag => new Typed(new KeyFlagNode(key.Key), TypedKind.Condition, token.Start, end),
-            NamedKeyKind.List => Fail($"{key.Key} is a list; expected a value, or number-of({key.Key})", token.Start, token.Length),
-            _ => Fail($"{key.Key} is a section; expected a value, or stated({key.Key})", token.Start, token.Length),
-        };
-    }
-
-    public Typed? NameCall(Token name, Token argument, int end)
-    {
-        if (name.Text is "known")
-        {
-            if (scope.Figures.Find(argument.Text) is not { } figure)
-            {
-                return Fail(
-                    $"there is no figure {argument.Text}{NearestName.Suggestion(argument.Text, FigureNames)}", argument.Start, argument.Length);
-            }
-
-            Add(Figures, figure.Name);
-            return new Typed(new KnownNode(figure.Name), TypedKind.Condition, name.Start, end);
-        }
-
-        if (ExpressionScope.FindKey(argument.Text) is not { } key)
-        {
-            return Fail($"there is no key {argument.Text}{NearestName.Suggestion(argument.Text, ExpressionScope.KeyNames)}", argument.Start, argument.Length);
-        }
-
-        Add(Keys, key.Key);
-        if (name.Text is "stated")
-        {
-            Add(StatedKeys, key.Key);
-            return new Typed(new StatedNode(key.Key), TypedKind.Condition, name.Start, end);
-        }
-
-        return key.Kind == NamedKeyKind.List
-            ? new Typed(new ListLengthNode(key.Key), TypedKind.Number, name.Start, end)
-            : Fail($"{key.Key} is not a list", argument.Start, argument.Length);
-    }
 
     public Typed? Junction(bool decisive, List<Typed> operands)
     {
@@ -327,8 +263,6 @@ internal sealed class ExpressionBinder(string text, ExpressionScope scope)
         };
     }
 
-    private IEnumerable<string> FigureNames => scope.Figures.Definitions.Select(d => d.Name);
-
     private static ExpressionNode Negated(ExpressionNode operand) =>
         operand is NumberNode number ? new NumberNode(-number.Number) : new NegationNode(operand);
 
@@ -336,14 +270,6 @@ internal sealed class ExpressionBinder(string text, ExpressionScope scope)
         (d.Length | d.Mass | d.Time | d.Current | d.Temperature) % 2 != 0
             ? null
             : new Dimension(d.Length / 2, d.Mass / 2, d.Time / 2, d.Current / 2, d.Temperature / 2);
-
-    private static void Add(List<string> names, string name)
-    {
-        if (!names.Contains(name, StringComparer.Ordinal))
-        {
-            names.Add(name);
-        }
-    }
 
     public static string Describe(Dimension dimension) => dimension == Dimension.None ? "a plain number" : dimension.ToString();
 
@@ -410,24 +336,6 @@ internal sealed class ExpressionBinder(string text, ExpressionScope scope)
             column.Length);
         return null;
     }
-
-    private Typed? UnknownName(Token token)
-    {
-        string advice = NearestName.Suggestion(token.Text, FigureNames.Concat(ExpressionScope.KeyNames));
-        int hyphen = token.Text.IndexOf('-', StringComparison.Ordinal);
-        if (hyphen > 0 && IsKnown(token.Text[..hyphen]))
-        {
-            advice = "; a minus sign has spaces round it";
-        }
-        else if (advice.Length == 0 && token.Text is "true" or "false")
-        {
-            advice = "; a flag is a condition by itself";
-        }
-
-        return Fail($"{token.Text} is neither a figure nor a key{advice}", token.Start, token.Length);
-    }
-
-    private bool IsKnown(string name) => scope.Figures.Find(name) is not null || ExpressionScope.FindKey(name) is not null;
 
     private bool AreNumbers(Typed left, Typed right)
     {

@@ -59,9 +59,9 @@ public sealed class ExpressionParser
             IsCondition = typed.Kind == TypedKind.Condition,
             IsText = typed.Kind == TypedKind.Text,
             DisplayUnit = typed.Unit,
-            Figures = [.. binder.Figures],
-            Keys = [.. binder.Keys],
-            StatedKeys = [.. binder.StatedKeys],
+            Figures = [.. binder.Names.Figures],
+            Keys = [.. binder.Names.Keys],
+            StatedKeys = [.. binder.Names.StatedKeys],
             Root = typed.Node,
         };
     }
@@ -237,7 +237,7 @@ public sealed class ExpressionParser
                 return ParseCall(token);
             case TokenKind.Name:
                 _next++;
-                return _binder.Name(token);
+                return _binder.Names.Name(token);
             case TokenKind.Symbol when token.Is("("):
                 _next++;
                 Typed? inner = Nest(ParseOr, token);
@@ -260,7 +260,7 @@ public sealed class ExpressionParser
             }
 
             _next++;
-            return Expect(")") ? _binder.NameCall(name, argument, End()) : null;
+            return Expect(")") ? _binder.Names.Call(name, argument, End()) : null;
         }
 
         if (name.Text is "table")

@@ -22,7 +22,7 @@ internal sealed record Blame(string Key, Region Region, ImmutableArray<RelatedPl
     {
         SpecDocument spec = graph.Spec;
         ImmutableArray<string> unstated = rule.Require?.StatedKeys ?? [];
-        string? key = unstated.FirstOrDefault(k => !spec.States(k) && rule.Levers.Contains(k, StringComparer.Ordinal))
+        string key = unstated.FirstOrDefault(k => !spec.States(k) && rule.Levers.Contains(k, StringComparer.Ordinal))
             ?? rule.Levers.FirstOrDefault(spec.States)
             ?? (rule.Require is null ? null : rule.Levers.FirstOrDefault() ?? unstated.FirstOrDefault(k => !spec.States(k)))
             ?? NamedKeys(rule).FirstOrDefault(spec.States)
@@ -31,6 +31,16 @@ internal sealed record Blame(string Key, Region Region, ImmutableArray<RelatedPl
             ?? NamedKeys(rule).FirstOrDefault()
             ?? "";
         return new Blame(key, Place(spec, key), Others(rule, spec, key));
+    }
+
+    /// <summary>
+    /// The place of a rule that does not concern the machine: a lever or a key that it names. No figure is computed for it.
+    /// </summary>
+    public static Blame OfBystander(Rule rule, SpecDocument spec)
+    {
+        ImmutableArray<string> keys = [.. rule.Levers.Concat(NamedKeys(rule))];
+        string key = keys.FirstOrDefault(spec.States) ?? keys.FirstOrDefault() ?? "";
+        return new Blame(key, Place(spec, key), []);
     }
 
     /// <summary>Blames a missing key.</summary>

@@ -96,8 +96,10 @@ internal static class MessageWriter
     }
 
     /// <summary>The unit of the workshop for a dimension; the base units where there is none.</summary>
-    public static string UnitOf(Dimension dimension) =>
-        dimension == Dimension.None ? "" : QuantityKind.All.FirstOrDefault(k => k.Dimension == dimension)?.DisplayUnit ?? dimension.ToString();
+    /// <remarks>Energy and torque share a dimension; rules speak of torque.</remarks>
+    public static string UnitOf(Dimension dimension) => dimension == Dimension.None ? ""
+        : dimension == Dimensions.Energy ? "N·m"
+        : QuantityKind.All.FirstOrDefault(k => k.Dimension == dimension)?.DisplayUnit ?? dimension.ToString();
 
     /// <summary>A value and its limit, with as many digits as it takes to tell them apart when they differ.</summary>
     private static (string Value, string Limit) Pair(MeasuredValue measured, string unit)

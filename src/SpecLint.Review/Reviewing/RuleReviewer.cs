@@ -152,11 +152,10 @@ internal sealed class RuleReviewer(FigureGraph graph)
         };
     }
 
-    private Finding NotApplicable(Rule rule, string reason) => Base(rule, Blame.Of(rule, graph)) with
+    private Finding NotApplicable(Rule rule, string reason) => Base(rule, Blame.OfBystander(rule, graph.Spec)) with
     {
         Kind = FindingKind.NotApplicable,
         Message = $"Not applicable: {reason}.",
-        Related = [],
     };
 
     private static Finding Base(Rule rule, Blame blame) => new()

@@ -53,6 +53,34 @@ internal sealed class BoundReader(ExpressionScope scope, FaultList faults)
         return least is null || most is null ? null : new Bound(least, most);
     }
 
+    /// <summary>The second bound that a mapping states, or null when it states none.</summary>
+    public Beyond? ReadBeyond(FieldReader fields, Grade grade)
+    {
+        if (fields.Find("beyond") is not { } node
+            || FieldReader.Open(node, node.Region, "beyond", ["at-most", "at-least", "within", "grade"], faults) is not { } inner)
+        {
+            return null;
+        }
+
+        Grade harsher = inner.Word("grade", RuleReader.Grades, Grade.Hold);
+        if (!inner.Has("grade"))
+        {
+            faults.Add("beyond lacks the field grade", fields.KeyRegion("beyond"));
+        }
+        else if (harsher <= grade && fields.Has("grade"))
+        {
+            faults.Add("beyond is no graver than the rule's first grade", inner.KeyRegion("grade"));
+        }
+
+        Bound? bound = Read(inner);
+        if (bound is null)
+        {
+            faults.Add("beyond lacks a bound; expected at-most, at-least or within", fields.KeyRegion("beyond"));
+        }
+
+        return bound is null ? null : new Beyond(bound, harsher);
+    }
+
     /// <summary>Reports what does not fit together in a rule.</summary>
     public void CheckShape(FieldReader fields, Rule rule)
     {
@@ -71,6 +99,12 @@ internal sealed class BoundReader(ExpressionScope scope, FaultList faults)
             faults.Add($"a hazard has no {odd}; it is reported where its condition holds", fields.KeyRegion(odd));
         }
 
+        CheckBounds(rule);
+    }
+
+    /// <summary>Reports bounds that do not fit the measure, the scale or each other.</summary>
+    public void CheckBounds(Rule rule)
+    {
         Dimension? wanted = rule.Source == RuleSource.Declarations ? Dimension.None : rule.Measure?.Dimension;
         if (wanted is not { } dimension)
         {

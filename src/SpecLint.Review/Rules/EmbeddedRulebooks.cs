@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using SpecLint.Review.Expressions;
 using SpecLint.Review.Figures;
+using SpecLint.Spec.Yaml;
 
 namespace SpecLint.Review.Rules;
 
@@ -16,20 +17,23 @@ public static class EmbeddedRulebooks
     public static ReferenceTables Tables => LoadedTables.Value;
 
     /// <summary>The texts that the rulebooks share, which a rulebook of the user may name too.</summary>
-    public static SharedTexts Texts() => TextsOf(Read(BookPrefix, "rules/books/"));
+    public static SharedTexts Texts() => TextsOf(ReadBooks().Select(b => b.Read));
 
     /// <summary>Reads the rulebooks, in order of name.</summary>
     /// <param name="figures">The figures that rules may name.</param>
     public static ImmutableArray<Rulebook> Load(FigureCatalogue figures)
     {
-        var files = Read(BookPrefix, "rules/books/");
-        SharedTexts shared = TextsOf(files);
+        (string Path, YamlReadResult Read)[] books = [.. ReadBooks()];
+        SharedTexts shared = TextsOf(books.Select(b => b.Read));
         var scope = new ExpressionScope(figures, Tables);
-        return [.. files.Select(file => RulebookLoader.Load(file.Path, file.Bytes.Span, scope, shared))];
+        return [.. books.Select(book => RulebookLoader.Load(book.Path, book.Read, scope, shared))];
     }
 
-    private static SharedTexts TextsOf(ImmutableArray<(string Path, ReadOnlyMemory<byte> Bytes)> files) =>
-        files.Aggregate(SharedTexts.None, (shared, file) => RulebookLoader.ReadSharedTexts(file.Bytes.Span, shared));
+    private static IEnumerable<(string Path, YamlReadResult Read)> ReadBooks() =>
+        Read(BookPrefix, "rules/books/").Select(file => (file.Path, YamlReader.Read(file.Bytes.Span, YamlLimits.Default)));
+
+    private static SharedTexts TextsOf(IEnumerable<YamlReadResult> books) =>
+        books.Aggregate(SharedTexts.None, (shared, book) => RulebookLoader.ReadSharedTexts(book, shared));
 
     private static ImmutableArray<(string Path, ReadOnlyMemory<byte> Bytes)> Read(string prefix, string folder)
     {

@@ -11,6 +11,10 @@ internal sealed class RuleReader(string rulebook, ExpressionScope scope, SharedT
 {
     private const int LongestId = 40;
 
+    /// <summary>The words of the grades.</summary>
+    internal static readonly ImmutableArray<(string, Grade)> Grades =
+        [("hold", Grade.Hold), ("query", Grade.Query), ("remark", Grade.Remark)];
+
     private static readonly ImmutableArray<string> RuleFields =
     [
         "id", "title", "source", "when", "from", "measure", "require", "at-most", "at-least", "within", "grade", "beyond", "scale", "unit",
@@ -24,9 +28,6 @@ internal sealed class RuleReader(string rulebook, ExpressionScope scope, SharedT
 
     private static readonly ImmutableArray<(string, SpecStage)> Stages =
         [("sketch", SpecStage.Sketch), ("order", SpecStage.Order), ("build", SpecStage.Build)];
-
-    private static readonly ImmutableArray<(string, Grade)> Grades =
-        [("hold", Grade.Hold), ("query", Grade.Query), ("remark", Grade.Remark)];
 
     private static readonly ImmutableArray<(string, BasisKind)> BasisKinds =
     [
@@ -60,7 +61,7 @@ internal sealed class RuleReader(string rulebook, ExpressionScope scope, SharedT
             Require = require,
             Bound = bound,
             Grade = grade,
-            Beyond = ReadBeyond(fields, grade),
+            Beyond = _bounds.ReadBeyond(fields, grade),
             Scale = _bounds.Number(fields.Scalar("scale"), "scale"),
             DisplayUnit = Unit(fields.Scalar("unit"), measure),
             Say = Say(fields, source),
@@ -88,33 +89,6 @@ internal sealed class RuleReader(string rulebook, ExpressionScope scope, SharedT
         }
 
         return id;
-    }
-
-    private Beyond? ReadBeyond(FieldReader fields, Grade grade)
-    {
-        if (fields.Find("beyond") is not { } node
-            || FieldReader.Open(node, node.Region, "beyond", ["at-most", "at-least", "within", "grade"], faults) is not { } inner)
-        {
-            return null;
-        }
-
-        Grade harsher = inner.Word("grade", Grades, Grade.Hold);
-        if (!inner.Has("grade"))
-        {
-            faults.Add("beyond lacks the field grade", fields.KeyRegion("beyond"));
-        }
-        else if (harsher <= grade && fields.Has("grade"))
-        {
-            faults.Add("beyond is no graver than the rule's first grade", inner.KeyRegion("grade"));
-        }
-
-        Bound? bound = _bounds.Read(inner);
-        if (bound is null)
-        {
-            faults.Add("beyond lacks a bound; expected at-most, at-least or within", fields.KeyRegion("beyond"));
-        }
-
-        return bound is null ? null : new Beyond(bound, harsher);
     }
 
     private string Unit(YamlScalar? scalar, Expression? measure)

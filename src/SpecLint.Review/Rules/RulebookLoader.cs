@@ -20,10 +20,13 @@ public static class RulebookLoader
     /// <param name="bytes">Its bytes.</param>
     /// <param name="scope">What its expressions can name.</param>
     /// <param name="shared">Texts of other rulebooks that it may name; its own come first.</param>
-    public static Rulebook Load(string path, ReadOnlySpan<byte> bytes, ExpressionScope scope, SharedTexts shared)
+    public static Rulebook Load(string path, ReadOnlySpan<byte> bytes, ExpressionScope scope, SharedTexts shared) =>
+        Load(path, YamlReader.Read(bytes, YamlLimits.Default), scope, shared);
+
+    internal static Rulebook Load(string path, YamlReadResult read, ExpressionScope scope, SharedTexts shared)
     {
         var faults = new FaultList();
-        if (Open(path, bytes, faults) is not { } fields)
+        if (Open(path, read, faults) is not { } fields)
         {
             return new Rulebook("", path, [], faults.Sorted());
         }
@@ -60,7 +63,10 @@ public static class RulebookLoader
     /// <param name="bytes">Its bytes.</param>
     /// <param name="shared">The texts so far.</param>
     public static SharedTexts ReadSharedTexts(ReadOnlySpan<byte> bytes, SharedTexts shared) =>
-        Open("", bytes, new FaultList()) is { } fields ? Own(fields, shared) : shared;
+        ReadSharedTexts(YamlReader.Read(bytes, YamlLimits.Default), shared);
+
+    internal static SharedTexts ReadSharedTexts(YamlReadResult read, SharedTexts shared) =>
+        Open("", read, new FaultList()) is { } fields ? Own(fields, shared) : shared;
 
     /// <summary>The identifiers that stand in more than one of several rulebooks, each as a fault of the later one.</summary>
     /// <param name="books">The rulebooks.</param>
@@ -82,9 +88,8 @@ public static class RulebookLoader
         return twins.ToImmutable();
     }
 
-    private static FieldReader? Open(string path, ReadOnlySpan<byte> bytes, FaultList faults)
+    private static FieldReader? Open(string path, YamlReadResult read, FaultList faults)
     {
-        YamlReadResult read = YamlReader.Read(bytes, YamlLimits.Default);
         foreach (YamlFault fault in read.Faults)
         {
             faults.Add(fault.Message, fault.Region);

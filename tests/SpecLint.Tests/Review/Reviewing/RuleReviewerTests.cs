@@ -197,4 +197,25 @@ public sealed class RuleReviewerTests
         Finding finding = ReviewRule("source: hazard\n" + fields);
         Assert.Equal((kind, message), (finding.Kind, finding.Message));
     }
+
+    [Fact]
+    public void RuleThatDoesNotConcern_ComputesNoFigure()
+    {
+        int computed = 0;
+        var counted = Catalogue["test.exact"] with { Name = "test.counted", Compute = e => { computed++; return e.Value(1, 0); } };
+        var catalogue = new SpecLint.Review.Figures.FigureCatalogue([counted]);
+        var graph = new SpecLint.Review.Figures.FigureGraph(ReadSpec(), catalogue);
+        string text = RuleText("when: machine.stator = \"slotted\"\nmeasure: test.counted\nat-most: 1 mm");
+        Rulebook book = RulebookLoader.Load(
+            "b.yaml",
+            System.Text.Encoding.UTF8.GetBytes(text),
+            new SpecLint.Review.Expressions.ExpressionScope(catalogue, ReferenceTables.Empty));
+        Finding finding = SpecLint.Review.Reviewing.Reviewer.ReviewRule(graph, Assert.Single(book.Rules));
+        Assert.Equal(FindingKind.NotApplicable, finding.Kind);
+        Assert.Equal(0, computed);
+    }
+
+    [Fact]
+    public void Message_OfATorque_IsInNewtonMetres() =>
+        Assert.Contains("is 7.5 N·m; expected at most 5.0 N·m", ReviewRule("measure: test.force * test.exact\nat-most: 5 N·m").Message, StringComparison.Ordinal);
 }
