@@ -20,6 +20,7 @@ public sealed class SarifLogBuilder
     private readonly SarifRules _rules;
     private readonly List<Artifact> _artifacts = [];
     private readonly List<Result> _results = [];
+    private bool _ranToTheEnd;
 
     /// <summary>A log without results.</summary>
     /// <param name="options">What goes in besides the reviews.</param>
@@ -28,11 +29,8 @@ public sealed class SarifLogBuilder
         ArgumentNullException.ThrowIfNull(options);
         _options = options;
         _rules = new SarifRules(options.Rules);
-        RanToTheEnd = options.RanToTheEnd;
+        _ranToTheEnd = options.RanToTheEnd;
     }
-
-    /// <summary>False once a spec could not be read; as the options say until then.</summary>
-    public bool RanToTheEnd { get; set; }
 
     /// <summary>Adds a review behind those added before.</summary>
     /// <param name="review">The review.</param>
@@ -44,6 +42,9 @@ public sealed class SarifLogBuilder
         _artifacts.Add(places.Artifact());
         _results.AddRange(new SarifResults(review, _options, _rules, places, path).All());
     }
+
+    /// <summary>Records that something asked for could not be read, so that the log does not claim to be whole.</summary>
+    public void MarkIncomplete() => _ranToTheEnd = false;
 
     /// <summary>Writes the log; the stream stays open.</summary>
     /// <param name="stream">Where to.</param>
@@ -80,7 +81,7 @@ public sealed class SarifLogBuilder
             Language = "en",
             ColumnKind = ColumnKind.Utf16CodeUnits,
             AutomationDetails = new RunAutomationDetails { Id = AutomationId },
-            Invocations = [new Invocation { ExecutionSuccessful = RanToTheEnd }],
+            Invocations = [new Invocation { ExecutionSuccessful = _ranToTheEnd }],
             Taxonomies = standards.IsEmpty ? null : [standards.Component(_options.ProgramVersion)],
             Artifacts = _artifacts,
             Results = _results,
