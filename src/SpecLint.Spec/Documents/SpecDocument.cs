@@ -1,4 +1,3 @@
-using System.Collections.Frozen;
 using System.Collections.Immutable;
 using SpecLint.Spec.Yaml;
 
@@ -7,8 +6,8 @@ namespace SpecLint.Spec.Documents;
 /// <summary>A spec as read: every leaf by dotted key with its place, and every fault found on the way.</summary>
 public sealed class SpecDocument
 {
-    private readonly FrozenDictionary<string, SpecValue> _values;
-    private readonly FrozenDictionary<string, Region> _sections;
+    private readonly Dictionary<string, SpecValue> _values;
+    private readonly Dictionary<string, Region> _sections;
 
     internal SpecDocument(
         string path,
@@ -21,8 +20,13 @@ public sealed class SpecDocument
         Text = text;
         Faults = faults;
         Values = [.. values];
-        _values = Values.ToFrozenDictionary(v => v.Key, StringComparer.Ordinal);
-        _sections = sections.ToFrozenDictionary(StringComparer.Ordinal);
+        _values = new Dictionary<string, SpecValue>(Values.Length, StringComparer.Ordinal);
+        foreach (var value in Values)
+        {
+            _values.TryAdd(value.Key, value);
+        }
+
+        _sections = new Dictionary<string, Region>(sections, StringComparer.Ordinal);
     }
 
     /// <summary>Path as given on the command line, with <c>/</c> between segments.</summary>
@@ -68,9 +72,26 @@ public sealed class SpecDocument
 
     /// <summary>The same spec with one leaf replaced or added; places stay those of the text as written.</summary>
     /// <param name="value">The new leaf.</param>
-    public SpecDocument With(SpecValue value)
+    public SpecDocument With(SpecValue value) => With([value]);
+
+    /// <summary>The same spec with some leaves replaced or added; places stay those of the text as written.</summary>
+    /// <param name="values">The new leaves, each key once.</param>
+    public SpecDocument With(IReadOnlyCollection<SpecValue> values)
     {
-        var values = Values.Where(v => !string.Equals(v.Key, value.Key, StringComparison.Ordinal)).Append(value);
-        return new SpecDocument(Path, Text, values, _sections, Faults);
+        var keys = values.Select(v => v.Key).ToHashSet(StringComparer.Ordinal);
+        return new SpecDocument(Path, Text, Values.Where(v => !keys.Contains(v.Key)).Concat(values), _sections, Faults);
     }
+
+    /// <summary>The same spec with one value set from text, read exactly as if it stood in the file.</summary>
+    /// <param name="key">Dotted key; an unknown one is a fault that names the nearest known key.</param>
+    /// <param name="text">The value with its unit, such as <c>12 mm ± 0.1 mm</c>.</param>
+    /// <param name="fault">What is wrong; null when the value was set.</param>
+    /// <returns>The changed spec; this one when there is a fault.</returns>
+    /// <remarks>An absent key takes the place of its nearest stated parent.</remarks>
+    public SpecDocument WithText(string key, string text, out SpecFault? fault) => SpecChange.Apply(this, key, text, out fault);
+
+    internal SpecDocument Rebuilt(IEnumerable<SpecValue> values, IEnumerable<SpecFault> faults) =>
+        new(Path, Text, values, _sections, [.. faults]);
+
+    internal bool HasSection(string key) => _sections.ContainsKey(key);
 }

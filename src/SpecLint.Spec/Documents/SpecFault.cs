@@ -13,4 +13,10 @@ public sealed record SpecFault(string Key, string Message, Region Region)
 
     /// <summary>What stands at <see cref="Related"/>; empty when there is none.</summary>
     public string RelatedMessage { get; init; } = "";
+
+    /// <summary>The known key that a mistyped one may have meant; empty when there is none.</summary>
+    public string SuggestedKey { get; init; } = "";
+
+    /// <summary>The dotted key that is absent, when that is the fault; else empty.</summary>
+    public string AbsentKey { get; init; } = "";
 }

@@ -60,4 +60,7 @@ public sealed record SpecValue
 
     /// <summary>Where the value stands.</summary>
     public required Region ValueRegion { get; init; }
+
+    /// <summary>Where the alias stands when the value was reached through one, also through a merge key; else null. Such a value is not edited in place.</summary>
+    public Region? AliasSite { get; init; }
 }

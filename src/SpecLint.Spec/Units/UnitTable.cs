@@ -46,6 +46,11 @@ public static class UnitTable
         }
 
         string wanted = UnitSpelling.Normalise(spelling);
+        if (TryFind("°" + wanted, out var degrees))
+        {
+            return degrees;
+        }
+
         return Units.FirstOrDefault(u => string.Equals(UnitSpelling.Normalise(u.Spelling), wanted, StringComparison.OrdinalIgnoreCase))
             ?? (wanted.Length < 3 ? null : Units.FirstOrDefault(u => EditDistance.Between(UnitSpelling.Normalise(u.Spelling), wanted) == 1 && u.Spelling.Length > 1));
     }
