@@ -1,7 +1,5 @@
-using System.Globalization;
 using System.Text;
 using Microsoft.CodeAnalysis.Sarif;
-using Newtonsoft.Json;
 using SpecLint.Review.Reviewing;
 using SpecLint.Reporting.Output;
 
@@ -50,8 +48,8 @@ public sealed class SarifLogBuilder
     /// <param name="stream">Where to.</param>
     public void Write(Stream stream)
     {
-        using var writer = new StreamWriter(stream, new UTF8Encoding(encoderShouldEmitUTF8Identifier: false), leaveOpen: true);
-        Write(writer);
+        ArgumentNullException.ThrowIfNull(stream);
+        JsonOutput.Write(stream, json => SarifJson.Write(json, Log()));
     }
 
     /// <summary>Writes the log; the writer stays open and decides the encoding.</summary>
@@ -59,20 +57,13 @@ public sealed class SarifLogBuilder
     public void Write(TextWriter writer)
     {
         ArgumentNullException.ThrowIfNull(writer);
-        string newLine = writer.NewLine;
-        writer.NewLine = "\n";
-        using (var json = new JsonTextWriter(writer) { Formatting = Formatting.Indented, Culture = CultureInfo.InvariantCulture, CloseOutput = false })
-        {
-            var settings = new JsonSerializerSettings { Culture = CultureInfo.InvariantCulture, ContractResolver = new SarifContract() };
-            JsonSerializer.Create(settings).Serialize(json, Log());
-        }
-
-        writer.NewLine = newLine;
-        writer.Write('\n');
-        writer.Flush();
+        using var stream = new MemoryStream();
+        Write(stream);
+        writer.Write(Encoding.UTF8.GetString(stream.GetBuffer().AsSpan(0, (int)stream.Length)));
     }
 
-    private SarifLog Log()
+    /// <summary>The log as objects.</summary>
+    internal SarifLog Log()
     {
         SarifStandards standards = _rules.Standards();
         var run = new Run
