@@ -11,7 +11,8 @@ internal sealed class Derivation
 {
     private readonly FigureGraph _graph;
     private readonly int _deepest;
-    private readonly HashSet<(FigureInputKind, string)> _seen = [];
+    private readonly Dictionary<FigureInput, int> _depth = [];
+    private readonly HashSet<FigureInput> _seen = [];
     private readonly List<DerivationStep> _steps = [];
 
     private Derivation(FigureGraph graph, int deepest)
@@ -27,9 +28,11 @@ internal sealed class Derivation
     public static IReadOnlyList<DerivationStep> Walk(FigureGraph graph, IEnumerable<string> figures, int deepest)
     {
         var derivation = new Derivation(graph, deepest);
-        foreach (string name in figures.Where(name => graph.Catalogue.Find(name) is not null))
+        var ends = figures.Where(name => graph.Catalogue.Find(name) is not null).Select(name => new FigureInput(FigureInputKind.Figure, name)).ToList();
+        derivation.Measure(ends);
+        foreach (FigureInput end in ends)
         {
-            derivation.Visit(new FigureInput(FigureInputKind.Figure, name), depth: 0);
+            derivation.Visit(end);
         }
 
         return derivation._steps;
@@ -46,22 +49,40 @@ internal sealed class Derivation
         _ => new DerivationStep { Kind = FigureInputKind.Part, Name = input.Name, Depth = depth, Value = "an intermediate result without a single number" },
     };
 
-    private void Visit(FigureInput input, int depth)
+    /// <summary>The least distance of each input from the named figures, level by level.</summary>
+    private void Measure(IEnumerable<FigureInput> figures)
     {
-        if (!_seen.Add((input.Kind, input.Name)))
+        var level = new Queue<FigureInput>();
+        foreach (FigureInput figure in figures.Where(figure => _depth.TryAdd(figure, 0)))
+        {
+            level.Enqueue(figure);
+        }
+
+        while (level.TryDequeue(out FigureInput input))
+        {
+            foreach (FigureInput below in _depth[input] <= _deepest ? InputsOf(_graph, input) : [])
+            {
+                if (_depth.TryAdd(below, _depth[input] + 1))
+                {
+                    level.Enqueue(below);
+                }
+            }
+        }
+    }
+
+    private void Visit(FigureInput input)
+    {
+        if (!_seen.Add(input))
         {
             return;
         }
 
-        if (depth <= _deepest)
+        foreach (FigureInput below in _depth[input] <= _deepest ? InputsOf(_graph, input) : [])
         {
-            foreach (FigureInput below in InputsOf(_graph, input))
-            {
-                Visit(below, depth + 1);
-            }
+            Visit(below);
         }
 
-        _steps.Add(Step(_graph, input, depth));
+        _steps.Add(Step(_graph, input, _depth[input]));
     }
 
     private static ImmutableArray<FigureInput> InputsOf(FigureGraph graph, FigureInput input) => input.Kind switch

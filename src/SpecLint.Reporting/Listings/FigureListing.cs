@@ -61,7 +61,14 @@ public static class FigureListing
 
             isFirst = false;
             page.Line("  " + group.Key, Emphasis.Heading);
-            WriteGroup(page, [.. group], options.IncludesAll);
+            if (options.IncludesAll)
+            {
+                WriteWithMeaning(page, group);
+            }
+            else
+            {
+                FigureTable.Write(page, group);
+            }
         }
 
         var lacking = all.Where(f => !f.Outcome.HasValue).ToList();
@@ -75,14 +82,8 @@ public static class FigureListing
         }
     }
 
-    private static void WriteGroup(TextPage page, IReadOnlyList<Figure> figures, bool withMeaning)
+    private static void WriteWithMeaning(TextPage page, IEnumerable<Figure> figures)
     {
-        if (!withMeaning)
-        {
-            FigureTable.Write(page, figures);
-            return;
-        }
-
         foreach (Figure figure in figures)
         {
             FigureTable.Write(page, [figure]);

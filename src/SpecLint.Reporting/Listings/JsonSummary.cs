@@ -89,7 +89,7 @@ public static class JsonSummary
     private static void Write(Utf8JsonWriter json, Finding finding)
     {
         json.WriteStartObject();
-        json.WriteString("rule", finding.Rule.Id);
+        json.WriteString("rule", Printable.Line(finding.Rule.Id));
         json.WriteString("title", Printable.Line(finding.Rule.Title));
         if (finding.Kind != FindingKind.Hazard)
         {

@@ -18,7 +18,7 @@ public static class RuleListing
         ArgumentNullException.ThrowIfNull(options);
         ArgumentNullException.ThrowIfNull(writer);
         var page = new TextPage(writer, options);
-        page.Wrapped(rule.Id + "  ", Printable.Line(rule.Title), Emphasis.Heading);
+        page.Wrapped(Printable.Line(rule.Id) + "  ", Printable.Line(rule.Title), Emphasis.Heading);
         page.Blank();
         foreach (var (label, text) in Parts(rule))
         {
@@ -48,7 +48,7 @@ public static class RuleListing
             page.Line(Printable.Line(book.Key), Emphasis.Heading);
             foreach (Rule rule in book)
             {
-                string lead = $"  {TextPage.Pad(rule.Id, 8)}{TextPage.Pad(GradeWords(rule), 14)}{TextPage.Pad(rule.Basis.KindText, 17)}";
+                string lead = $"  {TextPage.Pad(Printable.Line(rule.Id), 8)}{TextPage.Pad(GradeWords(rule), 14)}{TextPage.Pad(rule.Basis.KindText, 17)}";
                 page.Wrapped(lead, Printable.Line(rule.Title));
             }
         }
@@ -77,7 +77,7 @@ public static class RuleListing
     private static void Write(Utf8JsonWriter json, Rule rule)
     {
         json.WriteStartObject();
-        json.WriteString("id", rule.Id);
+        json.WriteString("id", Printable.Line(rule.Id));
         json.WriteString("title", Printable.Line(rule.Title));
         json.WriteString("rulebook", Printable.Line(rule.Rulebook));
         json.WriteString("grade", RuleText.GradeWord(rule.Grade));

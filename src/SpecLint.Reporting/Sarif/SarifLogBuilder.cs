@@ -1,7 +1,5 @@
-using System.Globalization;
 using System.Text;
 using Microsoft.CodeAnalysis.Sarif;
-using Newtonsoft.Json;
 using SpecLint.Review.Reviewing;
 using SpecLint.Reporting.Output;
 
@@ -20,6 +18,7 @@ public sealed class SarifLogBuilder
     private readonly SarifRules _rules;
     private readonly List<Artifact> _artifacts = [];
     private readonly List<Result> _results = [];
+    private bool _ranToTheEnd;
 
     /// <summary>A log without results.</summary>
     /// <param name="options">What goes in besides the reviews.</param>
@@ -28,11 +27,8 @@ public sealed class SarifLogBuilder
         ArgumentNullException.ThrowIfNull(options);
         _options = options;
         _rules = new SarifRules(options.Rules);
-        RanToTheEnd = options.RanToTheEnd;
+        _ranToTheEnd = options.RanToTheEnd;
     }
-
-    /// <summary>False once a spec could not be read; as the options say until then.</summary>
-    public bool RanToTheEnd { get; set; }
 
     /// <summary>Adds a review behind those added before.</summary>
     /// <param name="review">The review.</param>
@@ -45,12 +41,15 @@ public sealed class SarifLogBuilder
         _results.AddRange(new SarifResults(review, _options, _rules, places, path).All());
     }
 
+    /// <summary>Records that something asked for could not be read, so that the log does not claim to be whole.</summary>
+    public void MarkIncomplete() => _ranToTheEnd = false;
+
     /// <summary>Writes the log; the stream stays open.</summary>
     /// <param name="stream">Where to.</param>
     public void Write(Stream stream)
     {
-        using var writer = new StreamWriter(stream, new UTF8Encoding(encoderShouldEmitUTF8Identifier: false), leaveOpen: true);
-        Write(writer);
+        ArgumentNullException.ThrowIfNull(stream);
+        JsonOutput.Write(stream, json => SarifJson.Write(json, Log()));
     }
 
     /// <summary>Writes the log; the writer stays open and decides the encoding.</summary>
@@ -58,20 +57,13 @@ public sealed class SarifLogBuilder
     public void Write(TextWriter writer)
     {
         ArgumentNullException.ThrowIfNull(writer);
-        string newLine = writer.NewLine;
-        writer.NewLine = "\n";
-        using (var json = new JsonTextWriter(writer) { Formatting = Formatting.Indented, Culture = CultureInfo.InvariantCulture, CloseOutput = false })
-        {
-            var settings = new JsonSerializerSettings { Culture = CultureInfo.InvariantCulture, ContractResolver = new SarifContract() };
-            JsonSerializer.Create(settings).Serialize(json, Log());
-        }
-
-        writer.NewLine = newLine;
-        writer.Write('\n');
-        writer.Flush();
+        using var stream = new MemoryStream();
+        Write(stream);
+        writer.Write(Encoding.UTF8.GetString(stream.GetBuffer().AsSpan(0, (int)stream.Length)));
     }
 
-    private SarifLog Log()
+    /// <summary>The log as objects.</summary>
+    internal SarifLog Log()
     {
         SarifStandards standards = _rules.Standards();
         var run = new Run
@@ -80,7 +72,7 @@ public sealed class SarifLogBuilder
             Language = "en",
             ColumnKind = ColumnKind.Utf16CodeUnits,
             AutomationDetails = new RunAutomationDetails { Id = AutomationId },
-            Invocations = [new Invocation { ExecutionSuccessful = RanToTheEnd }],
+            Invocations = [new Invocation { ExecutionSuccessful = _ranToTheEnd }],
             Taxonomies = standards.IsEmpty ? null : [standards.Component(_options.ProgramVersion)],
             Artifacts = _artifacts,
             Results = _results,

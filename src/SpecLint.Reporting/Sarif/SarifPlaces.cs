@@ -73,12 +73,22 @@ internal sealed class SarifPlaces
         return location;
     }
 
+    /// <summary>A place of the spec as a step of a working; without the text, which the step's message tells.</summary>
+    /// <param name="region">The place.</param>
+    /// <param name="key">Dotted key.</param>
+    public Location StepLocation(TextRegion region, string key)
+    {
+        Location location = Location(region, key);
+        location.PhysicalLocation.Region.Snippet = null;
+        return location;
+    }
+
     /// <summary>A place of the spec at which a figure of the machine is told, since a figure has no line of its own.</summary>
     /// <param name="region">The place.</param>
     /// <param name="figure">Figure name.</param>
     public Location FigureLocation(TextRegion region, string figure)
     {
-        Location location = Location(region, key: "");
+        Location location = StepLocation(region, key: "");
         location.LogicalLocations = [new LogicalLocation { Name = LastPart(figure), FullyQualifiedName = figure, Kind = "variable" }];
         return location;
     }

@@ -12,7 +12,7 @@ internal static class SarifWorking
     private const int Deepest = 4;
 
     /// <summary>Steps kept at most, the last ones being nearest to the figure.</summary>
-    private const int MostSteps = 60;
+    private const int MostSteps = 100;
 
     /// <summary>The code flow, or null when the finding rests on no figure.</summary>
     /// <param name="graph">The machine; null when there is none.</param>
@@ -47,7 +47,7 @@ internal static class SarifWorking
     private static ThreadFlowLocation Step(DerivationStep step, Finding finding, SarifPlaces places)
     {
         Location location = step.Region is { } region
-            ? places.Location(region, step.Name)
+            ? places.StepLocation(region, step.Name)
             : places.FigureLocation(finding.Region, step.Name);
         location.Message = SarifText.Message(Sentence(step));
         return new ThreadFlowLocation

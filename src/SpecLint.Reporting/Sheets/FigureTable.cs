@@ -9,7 +9,7 @@ internal static class FigureTable
     /// <summary>Writes figures that have a value.</summary>
     /// <param name="page">Where to.</param>
     /// <param name="figures">The figures.</param>
-    public static void Write(TextPage page, IReadOnlyList<Figure> figures)
+    public static void Write(TextPage page, IEnumerable<Figure> figures)
     {
         foreach (Figure figure in figures)
         {

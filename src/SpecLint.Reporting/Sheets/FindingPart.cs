@@ -44,13 +44,8 @@ internal static class FindingPart
     {
         page.Blank();
         string word = RuleText.GradeWord(finding.Grade);
-        page.Wrapped($"{word,-8}{finding.Rule.Id}  ", Printable.Line(finding.Rule.Title), EmphasisOf(finding.Grade));
-        Labelled(page, "at", ReviewWords.Place(review.Spec, finding.Region.StartLine));
-        if (finding.Key.Length > 0)
-        {
-            Labelled(page, "", ReviewWords.KeyWithValue(review.Spec, finding.Key));
-        }
-
+        page.Wrapped($"{word,-8}{Printable.Line(finding.Rule.Id)}  ", Printable.Line(finding.Rule.Title), EmphasisOf(finding.Grade));
+        WritePlace(page, review, finding);
         Labelled(page, "found", Printable.Sentence(finding.Message));
         Labelled(page, "why", Printable.Sentence(finding.Rule.Why));
         Labelled(page, "basis", Printable.Line(RuleText.BasisWords(finding.Rule.Basis)));
@@ -64,6 +59,15 @@ internal static class FindingPart
         foreach (string note in finding.Rule.Safety)
         {
             Labelled(page, "safety", Printable.Sentence(note));
+        }
+    }
+
+    private static void WritePlace(TextPage page, MachineReview review, Finding finding)
+    {
+        Labelled(page, "at", ReviewWords.Place(review.Spec, finding.Region.StartLine));
+        if (finding.Key.Length > 0)
+        {
+            Labelled(page, "", ReviewWords.KeyWithValue(review.Spec, finding.Key));
         }
     }
 
@@ -87,8 +91,8 @@ internal static class FindingPart
         foreach (Finding finding in review.Waived.OrderByDescending(f => f.Grade))
         {
             page.Blank();
-            page.Wrapped("waived  " + finding.Rule.Id + "  ", $"{Printable.Line(finding.Rule.Title)} ({RuleText.GradeWord(finding.Grade)})", Emphasis.Heading);
-            Labelled(page, "at", ReviewWords.Place(review.Spec, finding.Region.StartLine));
+            page.Wrapped("waived  " + Printable.Line(finding.Rule.Id) + "  ", $"{Printable.Line(finding.Rule.Title)} ({RuleText.GradeWord(finding.Grade)})", Emphasis.Heading);
+            WritePlace(page, review, finding);
             Labelled(page, "found", Printable.Sentence(finding.Message));
             Waiver waiver = finding.Waiver!;
             string approval = waiver.ApprovedBy.Length > 0 ? "approved by " + Printable.Line(waiver.ApprovedBy) : "not yet approved";

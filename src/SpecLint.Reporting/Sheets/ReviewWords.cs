@@ -85,9 +85,18 @@ public static class ReviewWords
             : $"{measured}, {Relation(finding, value, limit)} {BandText.Value(limit, finding.DisplayUnit, finding.Dimension)} required";
     }
 
+    /// <summary>The side on which the bound lies: the rule's own word, or for a rule with two sides the one nearer to the value.</summary>
     private static string Relation(Finding finding, double value, double limit)
     {
-        bool isMet = finding.Margin is { } margin ? margin >= 0 : finding.Kind != FindingKind.Unmet;
-        return value > limit == isMet ? "at least" : "at most";
+        switch (finding.Rule.Bound)
+        {
+            case { Least: not null, Most: null }:
+                return "at least";
+            case { Least: null, Most: not null }:
+                return "at most";
+            default:
+                bool isKept = finding.Margin is { } margin ? margin >= 0 : finding.Kind != FindingKind.Unmet;
+                return value > limit == isKept ? "at least" : "at most";
+        }
     }
 }

@@ -30,7 +30,7 @@ internal static class RulePart
         page.Heading(heading);
         foreach (Finding finding in findings)
         {
-            page.Wrapped($"  {TextPage.Pad(finding.Rule.Id, 8)}", words(finding));
+            page.Wrapped($"  {TextPage.Pad(Printable.Line(finding.Rule.Id), 8)}", words(finding));
         }
     }
 

@@ -90,7 +90,7 @@ public static class TextSheet
             : review.ClosingKeys;
         foreach (string key in keys.Take(6))
         {
-            var waiting = open.Where(f => f.MissingKeys.Contains(key, StringComparer.Ordinal)).Select(f => f.Rule.Id).ToList();
+            var waiting = open.Where(f => f.MissingKeys.Contains(key, StringComparer.Ordinal)).Select(f => Printable.Line(f.Rule.Id)).ToList();
             string rules = waiting.Count == 0 ? "" : waiting.Count <= 6 ? string.Join(", ", waiting)
                 : string.Create(CultureInfo.InvariantCulture, $"{string.Join(", ", waiting.Take(5))} and {waiting.Count - 5} more");
             page.Wrapped("  " + TextPage.Pad("state " + Printable.Line(key), 34) + "  ", rules.Length > 0 ? "for " + rules : "");
@@ -109,7 +109,7 @@ public static class TextSheet
         foreach (Finding hazard in hazards)
         {
             page.Blank();
-            page.Wrapped($"  {hazard.Rule.Id}  ", Printable.Line(hazard.Rule.Title), Emphasis.Heading);
+            page.Wrapped($"  {Printable.Line(hazard.Rule.Id)}  ", Printable.Line(hazard.Rule.Title), Emphasis.Heading);
             page.Wrapped("          ", Printable.Sentence(hazard.Message));
             foreach (string note in hazard.Rule.Safety)
             {
@@ -130,7 +130,7 @@ public static class TextSheet
             line += string.Create(CultureInfo.InvariantCulture, $"{(counts.Length > 0 ? "; " : ": ")}{open} of hold grade open");
         }
 
-        string waived = string.Join(", ", review.Waived.Where(f => f.Grade == Grade.Hold).Select(f => f.Rule.Id).Distinct(StringComparer.Ordinal));
+        string waived = string.Join(", ", review.Waived.Where(f => f.Grade == Grade.Hold).Select(f => Printable.Line(f.Rule.Id)).Distinct(StringComparer.Ordinal));
         line += waived.Length > 0 ? $"; waived hold: {waived}" : "";
         page.Wrapped("Outcome  ", line, Emphasis.Heading);
     }

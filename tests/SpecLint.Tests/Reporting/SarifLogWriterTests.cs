@@ -36,6 +36,19 @@ public sealed class SarifLogWriterTests
         Write(All with { RanToTheEnd = false }), TestContext.Current.CancellationToken));
 
     [Fact]
+    public void Write_Log_ReadsBackAsTheObjectsItCameFrom()
+    {
+        var builder = new SarifLogBuilder(All);
+        builder.Add(SampleReviews.Held());
+        builder.Add(SampleReviews.Unreadable());
+        AddFixAndBaseline(builder.Log().Runs[0].Results[0]);
+        using var ours = new MemoryStream();
+        builder.Write(ours);
+        ours.Position = 0;
+        Assert.Equal(SavedByTheLibrary(builder.Log()), SavedByTheLibrary(SarifLog.Load(ours)));
+    }
+
+    [Fact]
     public void Write_ToStream_HasNoMarkAndNoCarriageReturn()
     {
         using var stream = new MemoryStream();
@@ -255,6 +268,36 @@ public sealed class SarifLogWriterTests
     [InlineData("A disc's rim", "AdiscsRim")]
     [InlineData("…", "Rule")]
     public void PascalCase_Title_BecomesOneWord(string title, string name) => Assert.Equal(name, SarifText.PascalCase(title));
+
+    private static string SavedByTheLibrary(SarifLog log)
+    {
+        using var stream = new MemoryStream();
+        log.Save(stream);
+        return Encoding.UTF8.GetString(stream.ToArray());
+    }
+
+    private static void AddFixAndBaseline(Result result)
+    {
+        result.BaselineState = BaselineState.Updated;
+        result.Fixes =
+        [
+            new Fix
+            {
+                Description = new Message { Text = "Even number of poles." },
+                ArtifactChanges =
+                [
+                    new ArtifactChange
+                    {
+                        ArtifactLocation = result.Locations[0].PhysicalLocation.ArtifactLocation,
+                        Replacements =
+                        [
+                            new Replacement { DeletedRegion = new Region { StartLine = 7, StartColumn = 10, EndLine = 7, EndColumn = 12 }, InsertedContent = new ArtifactContent { Text = "14" } },
+                        ],
+                    },
+                ],
+            },
+        ];
+    }
 
     private static MachineReview Hostile(string path)
     {

@@ -67,6 +67,19 @@ public sealed class TextSheetTests
         Assert.DoesNotContain("\u001b[2J", sheet, StringComparison.Ordinal);
     }
 
+    [Theory]
+    [InlineData("FLX-13", 2.0, "measured 2, at least 2 required")]
+    [InlineData("FIT-04", 1.6, "measured 1.600 ± 0.020, at most 1.6 required")]
+    public void Write_ValueAtItsBound_NamesTheSideOfTheRule(string rule, double value, string words)
+    {
+        MachineReview review = SampleReviews.Held();
+        Finding finding = review.Findings.First(f => f.Rule.Id == rule) with { Kind = FindingKind.Unmet, Value = value, Margin = 0 };
+        Assert.Contains(words, Write(new SheetOptions(), review with { Findings = [finding] }), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Write_NoReviews_WritesNothing() => Assert.Empty(Write(new SheetOptions()));
+
     [Fact]
     public void Write_AnyWords_StayWithinTheWidth()
     {
