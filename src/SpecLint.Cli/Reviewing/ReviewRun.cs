@@ -94,7 +94,11 @@ internal static class ReviewRun
 
     private static void WriteLog(string path, SarifLogBuilder log, List<string> problems)
     {
-        log.RanToTheEnd = problems.Count == 0;
+        if (problems.Count > 0)
+        {
+            log.MarkIncomplete();
+        }
+
         try
         {
             AtomicFile.Write(path, log.Write);

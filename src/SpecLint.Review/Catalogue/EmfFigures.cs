@@ -104,8 +104,11 @@ internal static class EmfFigures
             return x.Stop();
         }
 
+        // Steel past 1.6 T is outside the linear solution: what it may cost widens the band.
         double value = linkage.Harmonic(order);
-        return x.Value(value);
+        double saturation = x.OptionalFigure("saturation.linkage-loss") ?? 0;
+        Outcome linear = x.Value(value);
+        return linear.HasValue ? x.Value(value, double.Hypot(linear.Uncertainty, saturation * value)) : linear;
     }
 
     private static Outcome Of(Evaluation x, PartDefinition<HarmonicWaveform> wave, Func<HarmonicWaveform, double> reduce)

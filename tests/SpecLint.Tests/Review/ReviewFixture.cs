@@ -53,7 +53,7 @@ internal static class ReviewFixture
     public static Dimension Length { get; } = Dimensions.Length;
 
     /// <summary>Figures: a width with a band of 2 mm, a coarse temperature, a ratio, and one of each lack.</summary>
-    public static FigureCatalogue Catalogue { get; } = new(
+    public static FigureCatalogue Figures { get; } = new(
     [
         Figure("test.width", "m", "mm", Dimensions.Length, e => e.Value(e.Number("magnets.width"), 0.002)),
         Figure("test.hole", "m", "mm", Dimensions.Length, e => e.Value(e.Number("winding.coil.hole-width"), 0.001)),
@@ -66,7 +66,7 @@ internal static class ReviewFixture
         Figure("test.broken", "T", "T", Dimensions.FluxDensity, e => e.OutOfDomain("the gap is wider than the pole")),
     ]);
 
-    public static ExpressionScope Scope { get; } = new(Catalogue, Tables());
+    public static ExpressionScope Scope { get; } = new(Figures, Tables());
 
     public static SpecDocument ReadSpec(string text = Machine) => SpecReader.Read("machine.yaml", Encoding.UTF8.GetBytes(text));
 
@@ -83,7 +83,7 @@ internal static class ReviewFixture
         return spec;
     }
 
-    public static FigureGraph Graph(params (string Key, string Text)[] changes) => new(With(changes), Catalogue);
+    public static FigureGraph Graph(params (string Key, string Text)[] changes) => new(With(changes), Figures);
 
     public static Expression Parse(string text)
     {
@@ -139,9 +139,7 @@ internal static class ReviewFixture
     private static FigureDefinition Figure(string name, string unit, string shown, Dimension dimension, Func<Evaluation, Outcome> compute) => new()
     {
         Name = name,
-        Unit = unit,
-        DisplayUnit = shown,
-        Dimension = dimension,
+        UnitOfMeasure = new FigureUnit(unit, shown, dimension),
         Meaning = name,
         Formula = name,
         Basis = new Basis(BasisKind.Derived, ""),

@@ -85,7 +85,7 @@ public sealed class ExpressionTests
     public void Key_OfAnotherQuantityInThisMachine_DoesNotApply()
     {
         const string Linear = "spec: 1\nmachine: {topology: linear}\nratings: {speed: 2 m/s}\n";
-        var graph = new SpecLint.Review.Figures.FigureGraph(ReviewFixture.ReadSpec(Linear), Catalogue);
+        var graph = new SpecLint.Review.Figures.FigureGraph(ReviewFixture.ReadSpec(Linear), Figures);
         Assert.Equal(EvaluatedKind.NotApplicable, Parse("ratings.speed > 100 rpm").Evaluate(graph).Kind);
     }
 

@@ -86,7 +86,7 @@ public sealed class ReviewerTests
     [Fact]
     public void Faults_WithoutARuleForThem_AreStillFindings()
     {
-        MachineReview review = Reviewer.Review(ReadSpec("spec: 1\n"), Catalogue, [], ReviewOptions.Default);
+        MachineReview review = Reviewer.Review(ReadSpec("spec: 1\n"), Figures, [], ReviewOptions.Default);
         Assert.Contains(review.Findings, f => f.Rule.Id == "DOC-01" && f.Kind == FindingKind.Unmet);
     }
 
@@ -104,7 +104,7 @@ public sealed class ReviewerTests
     {
         var options = new ReviewOptions { On = on is null ? null : DateOnly.ParseExact(on, "yyyy-MM-dd", CultureInfo.InvariantCulture) };
         string text = Machine + "waivers:\n  - {" + fields + "}\n";
-        MachineReview review = Reviewer.Review(ReadSpec(text), Catalogue, Books("  - {id: A-1, title: t, require: 1 > 2, grade: hold"), options);
+        MachineReview review = Reviewer.Review(ReadSpec(text), Figures, Books("  - {id: A-1, title: t, require: 1 > 2, grade: hold"), options);
         Finding waiver = Assert.Single(review.Findings, f => f.Rule.Id == "DOC-03");
         Assert.Equal(kind, waiver.Kind);
         Assert.Contains(message, waiver.Message, StringComparison.Ordinal);
@@ -118,7 +118,7 @@ public sealed class ReviewerTests
     public void Waivers_OfTheOptions_Excuse()
     {
         var options = new ReviewOptions { Waivers = [new Waiver("A-1", "r", "a", "", Region.Beginning)] };
-        MachineReview review = Reviewer.Review(ReadSpec(), Catalogue, Books("  - {id: A-1, title: t, require: 1 > 2, grade: hold"), options);
+        MachineReview review = Reviewer.Review(ReadSpec(), Figures, Books("  - {id: A-1, title: t, require: 1 > 2, grade: hold"), options);
         Assert.Single(review.Waived);
     }
 
@@ -167,7 +167,7 @@ public sealed class ReviewerTests
         ? Run(Machine, rules)
         : Run(rules[0], rules[1..]);
 
-    private static MachineReview Run(string text, string[] rules) => Reviewer.Review(ReadSpec(text), Catalogue, Books(rules), ReviewOptions.Default);
+    private static MachineReview Run(string text, string[] rules) => Reviewer.Review(ReadSpec(text), Figures, Books(rules), ReviewOptions.Default);
 
     private static Rulebook[] Books(params string[] rules)
     {

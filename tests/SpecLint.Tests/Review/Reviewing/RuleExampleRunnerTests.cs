@@ -29,7 +29,7 @@ public sealed class RuleExampleRunnerTests
 
     private static System.Collections.Immutable.ImmutableArray<string> Run(string fields)
     {
-        var runner = new RuleExampleRunner(name => name == "small" ? ReadSpec() : null, Catalogue);
+        var runner = new RuleExampleRunner(name => name == "small" ? ReadSpec() : null, Figures);
         return runner.Run(ReviewFixture.Rule(fields));
     }
 

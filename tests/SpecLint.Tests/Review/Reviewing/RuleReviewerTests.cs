@@ -202,7 +202,7 @@ public sealed class RuleReviewerTests
     public void RuleThatDoesNotConcern_ComputesNoFigure()
     {
         int computed = 0;
-        var counted = Catalogue["test.exact"] with { Name = "test.counted", Compute = e => { computed++; return e.Value(1, 0); } };
+        var counted = Figures["test.exact"] with { Name = "test.counted", Compute = e => { computed++; return e.Value(1, 0); } };
         var catalogue = new SpecLint.Review.Figures.FigureCatalogue([counted]);
         var graph = new SpecLint.Review.Figures.FigureGraph(ReadSpec(), catalogue);
         string text = RuleText("when: machine.stator = \"slotted\"\nmeasure: test.counted\nat-most: 1 mm");

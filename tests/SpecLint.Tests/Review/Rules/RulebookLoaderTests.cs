@@ -205,7 +205,7 @@ public sealed class RulebookLoaderTests
             {
                 string text = string.Join(' ', parts.Select(p => words[p]));
                 var expression = SpecLint.Review.Expressions.ExpressionParser.Parse(text, Region.Beginning, Scope, out var fault);
-                _ = expression?.Measure(new FigureGraph(spec, Catalogue));
+                _ = expression?.Measure(new FigureGraph(spec, Figures));
                 return expression is null == fault is not null
                     && (fault is null || (fault.Start >= 0 && fault.Start + fault.Length <= text.Length));
             },
