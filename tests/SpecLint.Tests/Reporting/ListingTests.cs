@@ -58,6 +58,16 @@ public sealed class ListingTests
         Golden.Matches("reporting.figures.golden.txt", Text(w => FigureListing.WriteText(Graph.All(), new SheetOptions { IncludesAll = true }, w)));
 
     [Fact]
+    public void FigureListing_LongName_StaysWithinEightyColumns()
+    {
+        FigureDefinition definition = SampleFigures.Catalogue()["gap.magnetic"] with { Name = "gap.magnetic.between-the-faces.worst-case" };
+        var figure = new Figure(definition, Outcome.Of(0.0123456, 0.0001), []);
+        string text = Text(w => FigureListing.WriteText([figure], new SheetOptions(), w));
+        Assert.Contains("gap.magnetic.between-the-faces.worst-case 12.35  mm", text, StringComparison.Ordinal);
+        Assert.All(text.Split('\n'), line => Assert.InRange(line.Length, 0, 80));
+    }
+
+    [Fact]
     public void WorkingListing_Text_MatchesGolden() => Golden.Matches(
         "reporting.working.golden.txt", Text(w => WorkingListing.WriteText(Graph, "emf.phase.rms", new WorkingOptions { Depth = 3 }, w)));
 
