@@ -7,7 +7,7 @@ public sealed class ReferenceTests
 {
     [Theory]
     [InlineData("SpecLint.Physics", "MathNet.Numerics")]
-    [InlineData("SpecLint.Spec", "NJsonSchema,Newtonsoft.Json,UnitsNet,YamlDotNet")]
+    [InlineData("SpecLint.Spec", "NJsonSchema,NJsonSchema.Annotations,Newtonsoft.Json,UnitsNet,YamlDotNet")]
     [InlineData("SpecLint.Review", "SpecLint.Spec,SpecLint.Physics")]
     [InlineData("SpecLint.Reporting", "SpecLint.Review,SpecLint.Spec,Sarif,Newtonsoft.Json")]
     [InlineData("spec-lint", "SpecLint.Reporting,SpecLint.Review,SpecLint.Spec,System.CommandLine,Microsoft.Extensions.FileSystemGlobbing")]
