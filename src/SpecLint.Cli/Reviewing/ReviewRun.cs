@@ -5,9 +5,11 @@ using SpecLint.Reporting.Output;
 using SpecLint.Reporting.Sarif;
 using SpecLint.Reporting.Sheets;
 using SpecLint.Review.Catalogue;
+using SpecLint.Review.Figures;
 using SpecLint.Review.Reviewing;
 using SpecLint.Review.Rules;
 using SpecLint.Spec.Documents;
+using SpecLint.Spec.Schema;
 
 namespace SpecLint.Cli.Reviewing;
 
@@ -19,9 +21,13 @@ internal static class ReviewRun
     /// <param name="streams">Where to.</param>
     public static ExitCode Execute(ReviewRequest request, Streams streams)
     {
+        // Start-up is most of a cold review: the schema and the rulebooks load beside the reading of the first spec.
+        _ = SchemaCheck.Prepare();
+        Task<ImmutableArray<Rulebook>> loading = Task.Run(() => RulebookSource.Load(request.Rulebooks));
         var problems = new List<string>();
         IReadOnlyList<string> files = SpecFiles.Expand(request.Paths, problems);
-        ImmutableArray<Rulebook> books = RulebookSource.Load(request.Rulebooks);
+        Warm(files);
+        ImmutableArray<Rulebook> books = loading.GetAwaiter().GetResult();
         SheetOptions sheet = Terminal.SheetOptions(request.IncludesAll);
         SarifLogBuilder? log = request.SarifPath is null ? null : NewLog(request, books);
         var summary = new SummaryTable();
@@ -71,6 +77,23 @@ internal static class ReviewRun
 
         problems.ForEach(p => streams.Error.WriteLine($"spec-lint: {p}"));
         return problems.Count > 0 ? ExitCode.CouldNotRun : fails ? ExitCode.Findings : ExitCode.Clear;
+    }
+
+    /// <summary>Reads the first spec and asks for a costly figure while the rulebooks load; what it finds is read again in its turn.</summary>
+    private static void Warm(IReadOnlyList<string> files)
+    {
+        if (files.Count == 1 && files[0] != SpecFiles.StandardInput && File.Exists(files[0]))
+        {
+            try
+            {
+                SpecDocument spec = SpecSource.Read(files[0], files[0], Streams.None);
+                _ = ReadingReview.LeavesMachine(spec) ? new FigureGraph(spec, OurFigures.Catalogue)["coil.hole.worth"] : null;
+            }
+            catch (CannotRunException)
+            {
+                // Told when the file is read in its turn.
+            }
+        }
     }
 
     private static void PrintSheet(MachineReview review, int files, SheetOptions sheet, TextWriter output)
