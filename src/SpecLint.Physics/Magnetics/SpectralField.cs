@@ -124,13 +124,13 @@ public sealed class SpectralField
 
     /// <summary>Attraction across the gap with real plates and recoil permeability.</summary>
     /// <param name="remanentFluxDensity">Remanent flux density [T].</param>
-    /// <returns>Total force [N] (axial), force per pole [N] (linear), positive for attraction; 0 for an open stack.</returns>
+    /// <returns>Total force [N] (axial), force per pole [N] (linear), positive for attraction; NaN for an open stack, which pulls on nothing.</returns>
     public double AttractionForce(double remanentFluxDensity) =>
         (_force ??= ForceIn(_slab)).Value * RecoilFactor * RecoilFactor * remanentFluxDensity * remanentFluxDensity;
 
     /// <summary>Attraction across the gap with ideal steel and unit recoil permeability.</summary>
     /// <param name="remanentFluxDensity">Remanent flux density [T].</param>
-    /// <returns>Total force [N] (axial), force per pole [N] (linear), positive for attraction; 0 for an open stack.</returns>
+    /// <returns>Total force [N] (axial), force per pole [N] (linear), positive for attraction; NaN for an open stack, which pulls on nothing.</returns>
     public double IdealAttractionForce(double remanentFluxDensity) =>
         (_idealForce ??= ForceIn(_ideal)).Value * remanentFluxDensity * remanentFluxDensity;
 
@@ -144,7 +144,7 @@ public sealed class SpectralField
     {
         if (stack.Opposite == OppositeSide.Open)
         {
-            return (0.0, 0.0);
+            return (double.NaN, 0.0);
         }
 
         double measure = Magnets.Grid.IsLinear ? 0.5 * Magnets.Grid.PolePitch : Math.PI;

@@ -7,7 +7,7 @@ internal sealed class SpectralSum
     public const double Tolerance = 1e-7;
 
     private const int Nodes = WaveNumberGrid.NodesPerBlock;
-    private const double SteepestRatio = 0.2;
+    private const double SteepestRatio = 0.6;
     private const double SlowestRatio = 0.95;
     private const int LinearHarmonicCap = 400;
     private readonly MagnetTransform _magnets;
@@ -136,7 +136,7 @@ internal sealed class SpectralSum
     }
 
     /// <summary>Error of the panel rule relative to the sum of absolute terms.</summary>
-    private const double QuadratureError = 1e-8;
+    private const double QuadratureError = 5e-8;
 
     private static (double Sum, double Size, double Last, double Previous) Terms(
         ReadOnlySpan<double> amplitudes, ReadOnlySpan<double> magnet, ReadOnlySpan<double> other)

@@ -100,8 +100,6 @@ public sealed class ReferenceCase
             new SteelPlate { Thickness = plain, RelativePermeability = mu });
     }
 
-    public MagneticLayers SteelStackOrIdeal(double recoilPermeability) => IsLinear ? IdealStack(recoilPermeability) : SteelStack(recoilPermeability);
-
     public SpectralField Field(MagneticLayers stack)
     {
         WaveNumberGrid grid = WaveNumberGrid.For(Magnets, Coil);
