@@ -26,7 +26,7 @@ internal static class ReviewRun
         Task<ImmutableArray<Rulebook>> loading = Task.Run(() => RulebookSource.Load(request.Rulebooks));
         var problems = new List<string>();
         IReadOnlyList<string> files = SpecFiles.Expand(request.Paths, problems);
-        Warm(files);
+        IReadOnlyList<Attempt> attempted = files.Count == 1 ? [ReviewOne(files[0], request, loading, streams)] : [];
         ImmutableArray<Rulebook> books = loading.GetAwaiter().GetResult();
         SheetOptions sheet = Terminal.SheetOptions(request.IncludesAll);
         SarifLogBuilder? log = request.SarifPath is null ? null : NewLog(request, books);
@@ -35,7 +35,7 @@ internal static class ReviewRun
         bool fails = false;
         using (var progress = new Progress(files.Count, streams.Error))
         {
-            foreach (Attempt attempt in Attempts(files, request, books, streams))
+            foreach (Attempt attempt in files.Count == 1 ? attempted : (IEnumerable<Attempt>)InParallel(files, request, loading, streams))
             {
                 progress.Step();
                 if (attempt.Review is not { } review)
@@ -79,23 +79,6 @@ internal static class ReviewRun
         return problems.Count > 0 ? ExitCode.CouldNotRun : fails ? ExitCode.Findings : ExitCode.Clear;
     }
 
-    /// <summary>Reads the first spec and asks for a costly figure while the rulebooks load; what it finds is read again in its turn.</summary>
-    private static void Warm(IReadOnlyList<string> files)
-    {
-        if (files.Count == 1 && files[0] != SpecFiles.StandardInput && File.Exists(files[0]))
-        {
-            try
-            {
-                SpecDocument spec = SpecSource.Read(files[0], files[0], Streams.None);
-                _ = ReadingReview.LeavesMachine(spec) ? new FigureGraph(spec, OurFigures.Catalogue)["coil.hole.worth"] : null;
-            }
-            catch (CannotRunException)
-            {
-                // Told when the file is read in its turn.
-            }
-        }
-    }
-
     private static void PrintSheet(MachineReview review, int files, SheetOptions sheet, TextWriter output)
     {
         TextSheet.Write(review, sheet, output);
@@ -132,30 +115,33 @@ internal static class ReviewRun
         }
     }
 
-    private static IEnumerable<Attempt> Attempts(
-        IReadOnlyList<string> files,
-        ReviewRequest request,
-        ImmutableArray<Rulebook> books,
-        Streams streams)
+    /// <summary>The reviews of many specs, computed side by side and handed out in the order of the paths.</summary>
+    private static ParallelQuery<Attempt> InParallel(IReadOnlyList<string> files, ReviewRequest request, Task<ImmutableArray<Rulebook>> books, Streams streams) => files
+        .AsParallel()
+        .AsOrdered()
+        .WithMergeOptions(ParallelMergeOptions.NotBuffered)
+        .Select(file => ReviewOne(file, request, books, streams));
+
+    private static Attempt ReviewOne(string file, ReviewRequest request, Task<ImmutableArray<Rulebook>> books, Streams streams)
     {
-        var options = new ReviewOptions { On = request.On };
-        Attempt One(string file)
+        SpecDocument spec;
+        try
         {
-            try
-            {
-                SpecDocument spec = SpecSource.Change(SpecSource.Read(file, request.StandardInputName, streams), request.Changes);
-                return new Attempt(Reviewer.Review(spec, OurFigures.Catalogue, books, options), "");
-            }
-            catch (CannotRunException e)
-            {
-                return new Attempt(null, e.Message);
-            }
+            spec = SpecSource.Change(SpecSource.Read(file, request.StandardInputName, streams), request.Changes);
+        }
+        catch (CannotRunException e)
+        {
+            return new Attempt(null, e.Message);
         }
 
-        // Sheets come out in the order of the paths; a single spec does not pay for the query's start.
-        return files.Count < 2
-            ? files.Select(One)
-            : files.AsParallel().AsOrdered().WithMergeOptions(ParallelMergeOptions.NotBuffered).Select(One);
+        FigureGraph? graph = ReadingReview.LeavesMachine(spec) ? new FigureGraph(spec, OurFigures.Catalogue) : null;
+        if (graph is not null && !books.IsCompleted)
+        {
+            // The costliest figure that nearly every review needs; the rulebooks are still loading.
+            _ = graph["coil.hole.worth"];
+        }
+
+        return new Attempt(Reviewer.Review(spec, graph, books.GetAwaiter().GetResult(), new ReviewOptions { On = request.On }), "");
     }
 
     private readonly record struct Attempt(MachineReview? Review, string Problem);

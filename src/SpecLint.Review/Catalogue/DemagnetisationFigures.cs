@@ -23,7 +23,7 @@ internal static class DemagnetisationFigures
     public static IEnumerable<FigureDefinition> All =>
     [
         Define.Figure("permeance.coefficient", FigureUnit.Ratio, "permeance coefficient as installed, open circuit, mean of the magnet", "(1 − N) / N with N the mean demagnetising factor from the harmonic solution", Sources.Field, x =>
-            x.Part(FieldParts.Field) is { } solved ? x.Value(solved.PermeanceCoefficient) : x.Stop()) with { MethodUncertainty = 0.02 },
+            x.Part(FieldParts.RotorField) is { } solved ? x.Value(solved.PermeanceCoefficient) : x.Stop()) with { MethodUncertainty = 0.02 },
         Define.Figure("permeance.coefficient.loose", FigureUnit.Ratio, "permeance coefficient of one magnet alone in air, mean of the magnet", "(1 − N) / N with N the mean demagnetising factor of the free magnet", Sources.FreeMagnet, x =>
             x.Part(Loose) is { } loose ? x.Value((1 - loose.Outline.Mean) / loose.Outline.Mean) : x.Stop()) with { MethodUncertainty = 0.05 },
         Define.Figure("demagnetisation.opposing-field", FigureUnit.FieldStrength, "opposing field exceeded in 1 % of the installed magnet's volume, open circuit, hottest", "image sums over the magnet's volume × {magnet.remanence.hot} / μ0", Sources.Field, x =>

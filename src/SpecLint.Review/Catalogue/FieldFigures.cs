@@ -11,10 +11,13 @@ internal static class FieldFigures
     private const double SaturationOnset = 1.6;
 
     /// <summary>The field over a pole's centre, up to the magnets' face.</summary>
-    public static PartDefinition<PoleCentreField> PoleCentre { get; } = new("image sums of the field over a pole's centre", x => x.Part(FieldParts.Field) is { } solved ? new PoleCentreField(solved) : null);
+    public static PartDefinition<PoleCentreField> PoleCentre { get; } = new("image sums of the field over a pole's centre", x => x.Part(FieldParts.RotorField) is { } solved ? new PoleCentreField(solved) : null);
 
     /// <summary>Flux of one pole.</summary>
-    public static PartDefinition<PoleFlux> Flux { get; } = new("flux of one pole", x => x.Part(FieldParts.Field) is { } solved ? new PoleFlux(solved) : null);
+    public static PartDefinition<PoleFlux> Flux { get; } = new("flux of one pole", x => x.Part(FieldParts.RotorField) is { } solved ? new PoleFlux(solved) : null);
+
+    /// <summary>Harmonics of the field at the winding's height.</summary>
+    public static PartDefinition<WindingField> Harmonics { get; } = new("harmonics of the field in the gap", x => x.Part(FieldParts.RotorField) is { } solved ? new WindingField(solved) : null);
 
     /// <summary>Harmonics of the field inside the winding.</summary>
     public static PartDefinition<WindingField> Winding { get; } = new("field inside the winding", x => x.Part(FieldParts.Field) is { } solved ? new WindingField(solved) : null);
@@ -104,7 +107,7 @@ internal static class FieldFigures
     private static Outcome AtMiddle(Evaluation x)
     {
         double remanence = x.Figure("magnet.remanence");
-        return x.Part(PoleCentre) is { } centre && x.Part(FieldParts.Field) is { } field && !x.Incomplete
+        return x.Part(PoleCentre) is { } centre && x.Part(FieldParts.RotorField) is { } field && !x.Incomplete
             ? x.Value(Math.Abs(centre.At(field.Layer.MidHeight, remanence)))
             : x.Stop();
     }
@@ -120,7 +123,7 @@ internal static class FieldFigures
     private static Outcome Fundamental(Evaluation x)
     {
         double remanence = x.Figure("magnet.remanence");
-        return x.Part(Winding) is { } winding && x.Part(FieldParts.Field) is { } field && !x.Incomplete
+        return x.Part(Harmonics) is { } winding && x.Part(FieldParts.RotorField) is { } field && !x.Incomplete
             ? x.Value(Math.Abs(winding.NormalFundamental(field.Magnets.Geometry.PitchRadius, field.Layer.MidHeight, remanence)))
             : x.Stop();
     }
@@ -136,7 +139,7 @@ internal static class FieldFigures
     private static Outcome PoleFluxAtCoil(Evaluation x)
     {
         double remanence = x.Figure("magnet.remanence");
-        return x.Part(Flux) is { } flux && x.Part(FieldParts.Field) is { } field && !x.Incomplete
+        return x.Part(Flux) is { } flux && x.Part(FieldParts.RotorField) is { } field && !x.Incomplete
             ? x.Value(Math.Abs(flux.ThroughPlane(field.Layer.MidHeight, remanence)))
             : x.Stop();
     }
@@ -150,7 +153,7 @@ internal static class FieldFigures
 
         double remanence = x.Figure("magnet.remanence");
         double poles = MachineParts.IsLinear(x) ? x.Number("machine.poles") : 1;
-        return x.Part(FieldParts.Field) is { } field && !x.Incomplete ? x.Value(poles * field.AttractionForce(remanence)) : x.Stop();
+        return x.Part(FieldParts.RotorField) is { } field && !x.Incomplete ? x.Value(poles * field.AttractionForce(remanence)) : x.Stop();
     }
 
     private static Outcome PlateFlux(Evaluation x, string section)

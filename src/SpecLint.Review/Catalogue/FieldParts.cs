@@ -15,16 +15,35 @@ internal static class FieldParts
     /// <summary>Plan of the coil for the field solution.</summary>
     public static PartDefinition<Shape<CoilPlan>> Plan { get; } = new("plan of the coil", ReadPlan);
 
-    /// <summary>Transform of the magnets' outline.</summary>
-    public static PartDefinition<MagnetTransform> MagnetTransform { get; } = new("transform of the magnet", x =>
-        x.Part(Row) is { } row && x.Part(Plan) is { } plan
-            ? new MagnetTransform(row.Outline, WaveNumberGrid.For(row.Outline, plan.Outline))
+    /// <summary>Transform of the magnets' outline, on a grid that follows from the magnets alone.</summary>
+    public static PartDefinition<MagnetTransform> RotorTransform { get; } = new("transform of the magnet", x =>
+        x.Part(Row) is { } row
+            ? new MagnetTransform(row.Outline, WaveNumberGrid.For(row.Outline, NominalCoil(row.Outline)))
             : null);
+
+    /// <summary>Transform of the magnets on the grid that the coil shares; the rotor's own unless the coil reaches farther.</summary>
+    public static PartDefinition<MagnetTransform> MagnetTransform { get; } = new("transform of the magnet on the coil's grid", x =>
+    {
+        if (x.Part(RotorTransform) is not { } rotor || x.Part(Plan) is not { } plan)
+        {
+            return null;
+        }
+
+        WaveNumberGrid needed = WaveNumberGrid.For(rotor.Geometry, plan.Outline);
+        return needed.PanelWidth < rotor.Grid.PanelWidth ? new MagnetTransform(rotor.Geometry, needed) : rotor;
+    });
 
     /// <summary>Transform of the coil's turn density.</summary>
     public static PartDefinition<CoilTransform> CoilTransform { get; } = new("transform of the coil", x =>
-        x.Part(Row) is { } row && x.Part(Plan) is { } plan
-            ? new CoilTransform(plan.Outline, WaveNumberGrid.For(row.Outline, plan.Outline))
+        x.Part(MagnetTransform) is { } magnets && x.Part(Plan) is { } plan ? new CoilTransform(plan.Outline, magnets.Grid) : null);
+
+    /// <summary>
+    /// The solved gap field for what the coil's plan does not touch: field, flux and force. Its coil is a nominal one of
+    /// the magnets' size, which only weights the small correction for recoil permeability.
+    /// </summary>
+    public static PartDefinition<SpectralField> RotorField { get; } = new("harmonic solution of the rotor's field", x =>
+        x.Part(RotorTransform) is { } magnets
+            ? Solve(x, magnets, new CoilTransform(NominalCoil(magnets.Geometry), magnets.Grid))
             : null);
 
     /// <summary>Layers across the gap.</summary>
@@ -143,19 +162,26 @@ internal static class FieldParts
             : new SteelPlate { Thickness = thickness, RelativePermeability = permeability };
     }
 
-    private static SpectralField? ReadField(Evaluation x)
+    private static SpectralField? ReadField(Evaluation x) =>
+        x.Part(MagnetTransform) is { } magnets && x.Part(CoilTransform) is { } coil ? Solve(x, magnets, coil) : null;
+
+    private static SpectralField? Solve(Evaluation x, MagnetTransform magnets, CoilTransform coil)
     {
         double near = x.Number("gap.clearance") + (x.Optional("gap.cover") ?? 0);
         double thickness = x.Number("winding.coil.thickness");
-        if (x.Part(MagnetTransform) is not { } magnets
-            || x.Part(CoilTransform) is not { } coil
-            || x.Part(Layers) is not { } layers
-            || x.Incomplete)
+        if (x.Part(Layers) is not { } layers || x.Incomplete)
         {
             return null;
         }
 
         var layer = new CoilLayer { MidHeight = near + (0.5 * thickness), Thickness = thickness };
         return new SpectralField(magnets, coil, layers.Outline, layer);
+    }
+
+    /// <summary>A rectangular coil as long as the magnet, its legs a pole pitch apart to a large part.</summary>
+    private static CoilPlan NominalCoil(in MagnetGeometry magnets)
+    {
+        double pitch = magnets.IsLinear ? magnets.PolePitch : Math.PI * magnets.PitchRadius / magnets.PolePairs;
+        return CoilPlan.Rectangle(magnets.PitchRadius, magnets.Length, 0.5 * pitch, 0.3 * pitch);
     }
 }

@@ -16,6 +16,7 @@ internal static class PracticeFigures
         Define.Figure("current.density.practice", FigureUnit.CurrentDensity, "customary continuous current density for the stated cooling", "table current-density at {environment.cooling.method}", Sources.PracticeTable, x => Density(x, "warn-above")),
         Define.Figure("current.density.limit", FigureUnit.CurrentDensity, "continuous current density past all practice for the stated cooling", "table current-density at {environment.cooling.method}", Sources.PracticeTable, x => Density(x, "error-above")),
         Define.Figure("temperature.class", FigureUnit.Kelvin, "hot-spot temperature of the insulation: the lower of the insulation class and the wire's thermal class", "table insulation-classes at {ratings.insulation-class}; {winding.wire.thermal-class}", new Basis(BasisKind.Standard, "IEC 60085:2007, thermal classes"), ClassTemperature),
+        Define.Figure("spec.tolerances.missing", FigureUnit.Ratio, "how many of clearance, magnet thickness and remanence carry no tolerance; a named grade counts as one for the remanence", "count over {gap.clearance}, {magnets.thickness}, {magnets.material.remanence} or {magnets.grade}", Sources.Arithmetic, MissingTolerances),
         Define.Figure("ambient.temperature", FigureUnit.Kelvin, "hottest ambient", "{environment.ambient.max}, {environment.ambient} or {ratings.ambient}; 40 °C where none is stated", new Basis(BasisKind.Standard, "IEC 60034-1, 40 °C reference ambient (from memory)"), Ambient),
         Define.Figure("ambient.temperature.least", FigureUnit.Kelvin, "coldest ambient", "{environment.ambient.min}; by {environment.exposure} where it is not stated", Sources.PracticeTable, LeastAmbient),
     ];
@@ -73,6 +74,18 @@ internal static class PracticeFigures
         }
 
         return x.Value(least);
+    }
+
+    private static Outcome MissingTolerances(Evaluation x)
+    {
+        int missing = 0;
+        foreach (string key in (ReadOnlySpan<string>)["gap.clearance", "magnets.thickness"])
+        {
+            missing += x.Find(key) is { HasTolerance: true } ? 0 : 1;
+        }
+
+        bool remanence = x.Find("magnets.material.remanence") is { } stated ? stated.HasTolerance : x.States("magnets.grade");
+        return x.Value(missing + (remanence ? 0 : 1), 0);
     }
 
     private static Outcome Ambient(Evaluation x) =>
