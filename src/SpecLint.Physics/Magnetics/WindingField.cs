@@ -10,14 +10,14 @@ namespace SpecLint.Physics.Magnetics;
 public sealed class WindingField
 {
     /// <summary>Nodes along a leg or bar.</summary>
-    internal const int SectionNodes = 6;
+    internal const int SectionNodes = 5;
 
     /// <summary>Nodes through the winding's thickness.</summary>
-    internal const int HeightNodes = 6;
+    internal const int HeightNodes = 5;
 
     private const int Harmonics = 16;
     private const int Nodes = WaveNumberGrid.NodesPerBlock;
-    private const double Tolerance = 1e-5;
+    private const double Tolerance = 1e-3;
     private static readonly (double[] Nodes, double[] Weights) Along = GaussLegendreRule.Create(SectionNodes);
     private static readonly (double[] Nodes, double[] Weights) Through = GaussLegendreRule.Create(HeightNodes);
     private readonly SpectralField _field;
@@ -165,7 +165,9 @@ public sealed class WindingField
         WaveNumberGrid grid = _field.Magnets.Grid;
         double[] k = new double[Nodes];
         double[] weights = new double[Nodes];
-        LayerResponse[] responses = new LayerResponse[Nodes];
+        double[] total = new double[Nodes];
+        double[] normalAmplitude = new double[heights.Length * Nodes];
+        double[] inPlaneAmplitude = new double[heights.Length * Nodes];
         for (int block = 0; block < WaveNumberGrid.BlockCap; block++)
         {
             grid.Fill(block, k, weights);
@@ -177,7 +179,7 @@ public sealed class WindingField
                 double order = grid.IsLinear ? ((2 * j) + 1) * Math.PI / grid.PolePitch : ((2 * j) + 1) * grid.PolePairs / place;
                 if (j == 0 || grid.IsLinear)
                 {
-                    Respond(grid.IsLinear ? order : 0.0, k, responses);
+                    Respond(grid.IsLinear ? order : 0.0, (k, total), heights, (normalAmplitude, inPlaneAmplitude));
                 }
 
                 ReadOnlySpan<double> magnet = _field.Magnets.Harmonic(block, j);
@@ -185,12 +187,12 @@ public sealed class WindingField
                 for (int i = 0; i < Nodes; i++)
                 {
                     double measure = magnet[i] * weights[i] * (grid.IsLinear ? 1.0 / Math.PI : k[i]);
-                    double kk = responses[i].WaveNumber;
+                    double kk = total[i];
                     double radial = slope[line + i] * (grid.IsLinear ? k[i] / kk : 1.0);
                     for (int h = 0; h < heights.Length; h++)
                     {
-                        double inPlane = responses[i].InPlane(heights[h]) * measure;
-                        double term = responses[i].Normal(heights[h]) * measure * value[line + i];
+                        double inPlane = inPlaneAmplitude[(h * Nodes) + i] * measure;
+                        double term = normalAmplitude[(h * Nodes) + i] * measure * value[line + i];
                         normal[h][j] += term;
                         along[h][j] += inPlane * order / kk * value[line + i];
                         across[h][j] -= inPlane * radial;
@@ -217,11 +219,18 @@ public sealed class WindingField
         return added <= Tolerance * size;
     }
 
-    private void Respond(double alongWaveNumber, double[] k, LayerResponse[] responses)
+    private void Respond(
+        double alongWaveNumber, (double[] Across, double[] Total) k, double[] heights, (double[] Normal, double[] InPlane) amplitudes)
     {
         for (int i = 0; i < Nodes; i++)
         {
-            responses[i] = _field.SlabLayers.Response(double.Hypot(alongWaveNumber, k[i]));
+            k.Total[i] = double.Hypot(alongWaveNumber, k.Across[i]);
+            LayerResponse response = _field.SlabLayers.Response(k.Total[i]);
+            for (int h = 0; h < heights.Length; h++)
+            {
+                amplitudes.Normal[(h * Nodes) + i] = response.Normal(heights[h]);
+                amplitudes.InPlane[(h * Nodes) + i] = response.InPlane(heights[h]);
+            }
         }
     }
 
