@@ -46,13 +46,14 @@ internal static class FindingPart
         string word = RuleText.GradeWord(finding.Grade);
         page.Wrapped($"{word,-8}{Printable.Line(finding.Rule.Id)}  ", Printable.Line(finding.Rule.Title), EmphasisOf(finding.Grade));
         WritePlace(page, review, finding);
-        Labelled(page, "found", Printable.Sentence(finding.Message));
+        bool hasMargin = finding.Margin is not null && finding.Statement.Length > 0;
+        Labelled(page, "found", Printable.Sentence(hasMargin ? finding.Statement : finding.Message));
         Labelled(page, "why", Printable.Sentence(finding.Rule.Why));
         Labelled(page, "basis", Printable.Line(RuleText.BasisWords(finding.Rule.Basis)));
         if (finding.Margin is { } margin)
         {
             string measured = ReviewWords.Measured(finding);
-            Labelled(page, "margin", BandText.Margin(margin) + (measured.Length > 0 ? $" ({measured})" : ""));
+            Labelled(page, "margin", BandText.Margin(margin) + (measured.Length > 0 ? $" ({measured})" : "") + (finding.IsWithinUncertainty ? ", within its uncertainty" : ""));
         }
 
         WriteMoved(page, review, finding);
@@ -93,7 +94,8 @@ internal static class FindingPart
             page.Blank();
             page.Wrapped("waived  " + Printable.Line(finding.Rule.Id) + "  ", $"{Printable.Line(finding.Rule.Title)} ({RuleText.GradeWord(finding.Grade)})", Emphasis.Heading);
             WritePlace(page, review, finding);
-            Labelled(page, "found", Printable.Sentence(finding.Message));
+            bool hasMargin = finding.Margin is not null && finding.Statement.Length > 0;
+        Labelled(page, "found", Printable.Sentence(hasMargin ? finding.Statement : finding.Message));
             Waiver waiver = finding.Waiver!;
             string approval = waiver.ApprovedBy.Length > 0 ? "approved by " + Printable.Line(waiver.ApprovedBy) : "not yet approved";
             string until = waiver.Until.Length > 0 ? ", until " + Printable.Line(waiver.Until) : "";

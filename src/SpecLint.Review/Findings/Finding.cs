@@ -39,6 +39,9 @@ public sealed record Finding
     /// <summary>The sentence for people: figure, bound, margin in readable units.</summary>
     public required string Message { get; init; }
 
+    /// <summary>The rule's own part of <see cref="Message"/>, without the standing sentence on figure, bound and margin; empty when the message has no other part.</summary>
+    public string Statement { get; init; } = "";
+
     /// <summary>Dotted key to blame; empty for the whole document.</summary>
     public required string Key { get; init; }
 
@@ -62,6 +65,9 @@ public sealed record Finding
 
     /// <summary>Signed distance to the bound over the rule's scale; negative is not met.</summary>
     public double? Margin { get; init; }
+
+    /// <summary>True when the nominal value keeps the bound and only its band reaches past it.</summary>
+    public bool IsWithinUncertainty { get; init; }
 
     /// <summary>Dimension of value and bound.</summary>
     public Dimension Dimension { get; init; }

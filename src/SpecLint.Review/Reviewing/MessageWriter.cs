@@ -20,6 +20,9 @@ internal static class MessageWriter
     /// <summary>Most significant digits that a value and its limit are shown with to tell them apart.</summary>
     private const int MostDigits = 9;
 
+    /// <summary>Whole numbers below this are shown as counts.</summary>
+    private const double LargestCount = 1e6;
+
     /// <summary>The rule's own sentence with its gaps filled.</summary>
     public static string Say(Rule rule, FigureGraph graph, MeasuredValue? measured)
     {
@@ -82,7 +85,10 @@ internal static class MessageWriter
     public static string Percent(double share) => $"{UnitDisplay.Digits(share * 100)} %";
 
     /// <summary>A value in a unit; in base units where the unit is not in the table.</summary>
-    public static string Show(double si, string unit) => UnitDisplay.Format(si, unit);
+    /// <remarks>A whole number without a unit is a count and stands without decimals.</remarks>
+    public static string Show(double si, string unit) => unit.Length == 0 && Math.Abs(si) < LargestCount && Nearness.AreNear(si, Math.Round(si))
+        ? Math.Round(si).ToString(CultureInfo.InvariantCulture)
+        : UnitDisplay.Format(si, unit);
 
     /// <summary>A difference of values in a unit.</summary>
     public static string Difference(double si, string unit) => UnitDisplay.FormatDifference(si, unit);
@@ -149,7 +155,14 @@ internal static class MessageWriter
     private static string UnitOf(MessagePart part, FigureGraph graph)
     {
         Expression expression = part.Expression!;
-        string written = expression.Root is KeyNumberNode key ? graph.Spec.Find(key.Key)?.UnitText ?? "" : "";
+        string written = expression.Root switch
+        {
+            KeyNumberNode key => graph.Spec.Find(key.Key)?.UnitText ?? "",
+
+            // A speed is in rpm or in m/s, as the machine turns or travels.
+            FigureNode figure => graph[figure.Name].Definition.DisplayUnit,
+            _ => "",
+        };
         return new[] { part.Unit, written, expression.DisplayUnit }.FirstOrDefault(u => u.Length > 0) ?? UnitOf(expression.Dimension);
     }
 }

@@ -81,22 +81,24 @@ internal sealed class RuleReviewer(FigureGraph graph)
         var measured = new MeasuredValue(value.Number, value.Uncertainty, MessageWriter.UnitOf(rule, measure, verdict.Bound), verdict);
         string tail = MessageWriter.Tail(rule, measured, OtherLimit(verdict));
         bool isMet = verdict.Grade is null;
-        string message = isMet ? tail : MessageWriter.Join(MessageWriter.Say(rule, graph, measured), tail);
+        string statement = isMet ? "" : MessageWriter.Say(rule, graph, measured);
         if (!isMet && harsher?.Lack is { } unknown)
         {
-            message = MessageWriter.Join(message, $"The harsher bound could not be judged: {MessageWriter.Lack(unknown)}.");
+            statement = MessageWriter.Join(statement, $"The harsher bound could not be judged: {MessageWriter.Lack(unknown)}.");
         }
 
         return Base(rule, Blame.Of(rule, graph)) with
         {
             Kind = isMet ? FindingKind.Met : FindingKind.Unmet,
             Grade = verdict.Grade ?? rule.GravestGrade,
-            Message = message,
+            Message = MessageWriter.Join(statement, tail),
+            Statement = statement,
             Figures = measure.Figures,
             Value = value.Number,
             Uncertainty = value.Uncertainty,
             Limit = verdict.Limit,
             Margin = verdict.Margin,
+            IsWithinUncertainty = verdict.IsUncertain,
             Dimension = measure.Dimension,
             DisplayUnit = measured.Unit,
         };

@@ -137,7 +137,7 @@ public sealed class RuleReviewerTests
     {
         Finding finding = ReviewRule("measure: 50 V\nat-most: 40 V\ngrade: query\nbeyond: {at-most: test.missing, grade: hold}");
         Assert.Equal((FindingKind.Unmet, Grade.Query), (finding.Kind, finding.Grade));
-        Assert.EndsWith("The harsher bound could not be judged: needs load.voltage and load.cable.length.", finding.Message, StringComparison.Ordinal);
+        Assert.Contains("The harsher bound could not be judged: needs load.voltage and load.cable.length.", finding.Message, StringComparison.Ordinal);
     }
 
     [Fact]
