@@ -1,8 +1,8 @@
 using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Magnetics;
+using SpecLint.Physics.Windings;
 using SpecLint.Review.Figures;
 using CoilOutline = SpecLint.Physics.Geometry.CoilOutline;
-using CoilPlan = SpecLint.Physics.Magnetics.CoilGeometry;
 
 namespace SpecLint.Review.Catalogue;
 
@@ -11,31 +11,36 @@ internal static class CoilWorthFigures
 {
     private const double ThinnerShare = 0.9;
     private const double GoldenRatio = 0.6180339887498949;
-    private const int SearchSteps = 9;
+    private const int SearchSteps = 12;
+    private const double ClimbFactor = 1.14;
+    private const int MostClimbs = 5;
 
     /// <summary>Best hole width and what the present one reaches of it.</summary>
     public static PartDefinition<Shape<HoleSearch>> Hole { get; } = new("search for the best hole width", Search);
 
     public static IEnumerable<FigureDefinition> All =>
     [
-        Define.Figure("coil.last-tenth.worth", FigureUnit.Ratio, "relative EMF gained over relative copper added by the last tenth of coil thickness, wire and clearance kept, turns in proportion", "(linkage at {winding.coil.thickness} over 0.9 × linkage at nine tenths of it − 1) / (1/0.9 − 1)", Sources.Field, LastTenth),
+        Define.Figure("coil.last-tenth.worth", FigureUnit.Ratio, "relative EMF gained over relative copper added by the last tenth of coil thickness, wire and clearance kept, turns in proportion", "(linkage at {winding.coil.thickness} over 0.9 × linkage at nine tenths of it, clearances kept, − 1) / (1/0.9 − 1)", Sources.Field, LastTenth),
         Define.Figure("coil.hole.worth", FigureUnit.Ratio, "the coil's E²/R over the best that any hole width gives with the same wire, turns and leg", "{linkage.turn.fundamental}² / {coil.turn-length.mean} over its greatest value for other hole widths", Sources.Field, x =>
             x.Part(Hole) is { } hole ? x.Value(hole.Outline.Worth) : x.Stop()),
-        Define.Figure("coil.hole.best", FigureUnit.Metre, "hole extent along the motion that gives the greatest E²/R", "golden-section search over the hole width", Sources.Field, x =>
-            x.Part(Hole) is { } hole ? x.Value(hole.Outline.BestWidth) : x.Stop()) with { MethodUncertainty = 0.02 },
+        Define.Figure("coil.hole.best", FigureUnit.Metre, "hole extent along the motion that gives the greatest E²/R", "golden-section search with the coil's own winding factor, then steps of 14 % with the harmonic solution", Sources.Field, x =>
+            x.Part(Hole) is { } hole ? x.Value(hole.Outline.BestWidth) : x.Stop()) with { MethodUncertainty = 0.1 },
         Define.Figure("plate.gain", FigureUnit.Percent, "what an ideal return plate at the same clearance would add to the EMF", "linkage with a plate behind the coil over {linkage.turn.fundamental}, less 1", Sources.Field, PlateGain),
     ];
 
     private static Outcome LastTenth(Evaluation x)
     {
-        double thickness = x.Number("winding.coil.thickness");
-        double full = x.Figure("linkage.turn.fundamental");
-        if (x.Incomplete)
+        if (x.Part(FieldParts.Field) is not { } field || x.Incomplete)
         {
             return x.Stop();
         }
 
-        double thinner = x.Varied("linkage.turn.fundamental", ("winding.coil.thickness", ThinnerShare * thickness));
+        // Clearances kept: a thinner coil lets the magnets come closer, and its middle sinks toward them.
+        double removed = (1 - ThinnerShare) * field.Layer.Thickness;
+        CoilLayer thinnerLayer = new() { MidHeight = field.Layer.MidHeight - (0.5 * removed), Thickness = field.Layer.Thickness - removed };
+        MagneticLayers thinnerStack = field.Stack.Opposite == OppositeSide.Open ? field.Stack : field.Stack with { Gap = field.Stack.Gap - removed };
+        double full = field.IdealFluxLinkage(1).Harmonic(1);
+        double thinner = new SpectralField(field.Magnets, field.Coil, thinnerStack, thinnerLayer).IdealFluxLinkage(1).Harmonic(1);
         double gain = (full / (ThinnerShare * thinner)) - 1;
         return x.Value(gain / ((1 / ThinnerShare) - 1), 0.02);
     }
@@ -67,25 +72,36 @@ internal static class CoilWorthFigures
     private static Shape<HoleSearch>? Search(Evaluation x)
     {
         double pitch = x.Figure("magnet.pole-pitch");
-        if (x.Part(MachineParts.Coil) is not { } coil
-            || x.Part(FieldParts.Row) is not { } row
-            || x.Part(FieldParts.Field) is not { } field
-            || x.Incomplete)
+        double pairs = x.Figure("machine.pole-pairs");
+        bool linear = MachineParts.IsLinear(x);
+        if (x.Part(MachineParts.Coil) is not { } coil || x.Part(FieldParts.Field) is not { } field || x.Incomplete)
         {
             return null;
         }
 
+        // The coil's own factor at the mean radius finds the place; near its top the merit is flat, and the full solution judges it.
         CoilOutline present = coil.Outline;
         double leg = present.LegWidth;
         double widest = Math.Max(1.2 * pitch, present.HoleWidth + leg) - leg;
-        CoilOutline wide = WithHole(present, widest);
-        if (!Physics.Geometry.CoilGeometry.IsBuildable(wide))
+        double narrowest = Math.Max(0.05 * pitch, (0.4 * pitch) - leg);
+        double OwnFactor(double hole)
         {
-            wide = present;
+            CoilOutline outline = WithHole(present, hole);
+            if (!Physics.Geometry.CoilGeometry.IsBuildable(outline))
+            {
+                return 0;
+            }
+
+            double factor = linear
+                ? CoilSpanFactor.OfLinearCoil(outline, 1, pitch)
+                : CoilSpanFactor.OfDiscCoil(outline, 1, (int)pairs, outline.PitchRadius);
+            double reach = outline.Shape == Physics.Geometry.CoilShape.Round ? outline.HoleWidth + leg : 1;
+            return factor * factor * reach * reach / Physics.Geometry.CoilGeometry.MeanTurnLength(outline);
         }
 
-        WaveNumberGrid grid = WaveNumberGrid.For(row.Outline, FieldParts.PlanOf(wide));
-        var magnets = new MagnetTransform(row.Outline, grid);
+        double place = GreatestOf(OwnFactor, narrowest, widest);
+        WaveNumberGrid grid = WaveNumberGrid.For(field.Magnets.Geometry, FieldParts.PlanOf(WithHole(present, widest)));
+        MagnetTransform magnets = grid.PanelWidth < field.Magnets.Grid.PanelWidth ? new MagnetTransform(field.Magnets.Geometry, grid) : field.Magnets;
         double Merit(double hole)
         {
             CoilOutline outline = WithHole(present, hole);
@@ -94,24 +110,51 @@ internal static class CoilWorthFigures
                 return 0;
             }
 
-            CoilPlan plan = FieldParts.PlanOf(outline);
-            double linkage = new SpectralField(magnets, new CoilTransform(plan, grid), field.Stack, field.Layer)
-                .FluxLinkageIn(field.Stack.WithIdealSteel()).Harmonic(1);
+            var transform = new CoilTransform(FieldParts.PlanOf(outline), magnets.Grid);
+            double linkage = new SpectralField(magnets, transform, field.Stack, field.Layer).IdealFluxLinkage(1).Harmonic(1);
             return linkage * linkage / Physics.Geometry.CoilGeometry.MeanTurnLength(outline);
         }
 
-        double now = Merit(present.HoleWidth);
-        (double best, double merit) = GreatestOf(Merit, Math.Max(0.05 * pitch, (0.4 * pitch) - leg), widest);
-        return merit > now
-            ? new(new HoleSearch(Physics.Geometry.CoilGeometry.HoleExtent(WithHole(present, best)), now / merit))
-            : new(new HoleSearch(Physics.Geometry.CoilGeometry.HoleExtent(present), 1));
+        double presentLinkage = field.IdealFluxLinkage(1).Harmonic(1);
+        double now = presentLinkage * presentLinkage / Physics.Geometry.CoilGeometry.MeanTurnLength(WithHole(present, present.HoleWidth));
+        (double best, double merit) = Climb(Merit, place, widest);
+        (best, merit) = now > merit ? (present.HoleWidth, now) : (best, merit);
+        return new(new HoleSearch(Physics.Geometry.CoilGeometry.HoleExtent(WithHole(present, best)), now / merit));
     }
 
     private static CoilOutline WithHole(in CoilOutline coil, double hole) => coil.Shape == Physics.Geometry.CoilShape.Round
         ? coil with { HoleWidth = hole, HoleLength = hole }
         : coil with { HoleWidth = hole, CornerRadius = null };
 
-    private static (double At, double Value) GreatestOf(Func<double, double> merit, double low, double high)
+    /// <summary>Steps from a first guess while it pays, up or down.</summary>
+    private static (double At, double Value) Climb(Func<double, double> merit, double first, double greatest)
+    {
+        double at = first;
+        double value = merit(first);
+        foreach (double factor in (ReadOnlySpan<double>)[ClimbFactor, 1 / ClimbFactor])
+        {
+            for (int step = 0; step < MostClimbs; step++)
+            {
+                double next = Math.Min(greatest, at * factor);
+                double there = merit(next);
+                if (there <= value)
+                {
+                    break;
+                }
+
+                (at, value) = (next, there);
+            }
+
+            if (at > first)
+            {
+                break;
+            }
+        }
+
+        return (at, value);
+    }
+
+    private static double GreatestOf(Func<double, double> merit, double low, double high)
     {
         double inner = high - (GoldenRatio * (high - low));
         double outer = low + (GoldenRatio * (high - low));
@@ -133,7 +176,7 @@ internal static class CoilWorthFigures
             }
         }
 
-        return atInner > atOuter ? (inner, atInner) : (outer, atOuter);
+        return atInner > atOuter ? inner : outer;
     }
 }
 
