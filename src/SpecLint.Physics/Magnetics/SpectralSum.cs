@@ -136,7 +136,7 @@ internal sealed class SpectralSum
     }
 
     /// <summary>Bound on the panel rule's error relative to the sum of absolute terms, well above the largest seen on thousands of random machines.</summary>
-    private const double QuadratureError = 1e-6;
+    private const double QuadratureError = 7e-7;
 
     private static (double Sum, double Size, double Last, double Previous) Terms(
         ReadOnlySpan<double> amplitudes, ReadOnlySpan<double> magnet, ReadOnlySpan<double> other)
