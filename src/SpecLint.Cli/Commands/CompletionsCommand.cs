@@ -32,7 +32,7 @@ internal static class CompletionsCommand
 
     public static Command Build(Streams streams)
     {
-        var shell = new Argument<string>("SHELL") { Description = "bash, zsh or fish." };
+        var shell = new Argument<string>("SHELL") { HelpName = "SHELL", Description = "bash, zsh or fish." };
         shell.CompletionSources.Add("bash", "zsh", "fish");
         shell.Validators.Add(result =>
         {

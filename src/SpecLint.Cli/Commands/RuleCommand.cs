@@ -12,7 +12,7 @@ internal static class RuleCommand
 {
     public static Command Build(Streams streams)
     {
-        var id = new Argument<string>("ID") { Description = "The rule's identifier, e.g. FIT-04; 'spec-lint rules' lists them." };
+        var id = new Argument<string>("ID") { HelpName = "ID", Description = "The rule's identifier, e.g. FIT-04; 'spec-lint rules' lists them." };
         id.CompletionSources.Add(_ => OurRulebooks.All.SelectMany(b => b.Rules).Select(r => new System.CommandLine.Completions.CompletionItem(r.Id)));
         Option<string[]> rulebooks = Shared.Rulebook();
         var command = new Command("rule", "Shows one rule: what it demands, why, from what source, what to change, what can hurt someone.") { id, rulebooks };

@@ -16,7 +16,7 @@ internal static class WorkingCommand
     public static Command Build(Streams streams)
     {
         Argument<string> spec = Shared.Spec();
-        var figure = new Argument<string>("FIGURE") { Description = "The figure's name, e.g. resistance.phase.cold; 'spec-lint figures SPEC' lists them." };
+        var figure = new Argument<string>("FIGURE") { HelpName = "FIGURE", Description = "The figure's name, e.g. resistance.phase.cold; 'spec-lint figures SPEC' lists them." };
         figure.CompletionSources.Add(_ => OurFigures.Catalogue.Definitions.Select(d => new System.CommandLine.Completions.CompletionItem(d.Name)));
         Option<string> format = Shared.Words("--format", "What to print.", "text", "markdown", "json");
         Option<string[]> set = Shared.Set();

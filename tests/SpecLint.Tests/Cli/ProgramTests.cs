@@ -190,6 +190,19 @@ public sealed class ProgramTests : IDisposable
     }
 
     [Fact]
+    public void Help_OfTheProgram_FitsAScreen()
+    {
+        ProcessOutcome run = _program.Run("--help");
+
+        Assert.Equal(0, run.ExitCode);
+        Assert.InRange(run.Output.Split('\n').Length, 10, 40);
+        foreach (string command in (string[])["review", "figures", "working", "rule", "rules", "start", "completions"])
+        {
+            Assert.Contains($"  {command} ", run.Output, StringComparison.Ordinal);
+        }
+    }
+
+    [Fact]
     public void Rules_And_Rule_ShowTheCatalogue()
     {
         Assert.Contains("FIT-04", _program.Run("rules").Output, StringComparison.Ordinal);
