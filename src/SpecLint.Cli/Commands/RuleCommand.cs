@@ -2,8 +2,8 @@ using System.CommandLine;
 using SpecLint.Cli.Reviewing;
 using SpecLint.Reporting.Listings;
 using SpecLint.Review.Catalogue;
-using SpecLint.Review.Expressions;
 using SpecLint.Review.Rules;
+using SpecLint.Spec.Names;
 
 namespace SpecLint.Cli.Commands;
 

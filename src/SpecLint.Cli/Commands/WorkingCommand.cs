@@ -3,8 +3,8 @@ using System.Globalization;
 using SpecLint.Cli.Reviewing;
 using SpecLint.Reporting.Listings;
 using SpecLint.Review.Catalogue;
-using SpecLint.Review.Expressions;
 using SpecLint.Spec.Documents;
+using SpecLint.Spec.Names;
 
 namespace SpecLint.Cli.Commands;
 

@@ -2,6 +2,7 @@ using System.Collections.Frozen;
 using System.Collections.Immutable;
 using SpecLint.Review.Figures;
 using SpecLint.Review.Rules;
+using SpecLint.Spec.Names;
 using SpecLint.Spec.Units;
 
 namespace SpecLint.Review.Expressions;

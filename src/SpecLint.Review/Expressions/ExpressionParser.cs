@@ -1,3 +1,4 @@
+using SpecLint.Spec.Names;
 using SpecLint.Spec.Yaml;
 
 namespace SpecLint.Review.Expressions;

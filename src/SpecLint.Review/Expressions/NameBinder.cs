@@ -1,4 +1,5 @@
 using SpecLint.Review.Figures;
+using SpecLint.Spec.Names;
 
 namespace SpecLint.Review.Expressions;
 

@@ -3,6 +3,7 @@ using SpecLint.Review.Figures;
 using SpecLint.Review.Findings;
 using SpecLint.Review.Rules;
 using SpecLint.Spec.Documents;
+using SpecLint.Spec.Names;
 using SpecLint.Spec.Units;
 
 namespace SpecLint.Review.Reviewing;

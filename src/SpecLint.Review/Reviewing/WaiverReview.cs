@@ -3,6 +3,7 @@ using System.Globalization;
 using SpecLint.Review.Findings;
 using SpecLint.Review.Rules;
 using SpecLint.Spec.Documents;
+using SpecLint.Spec.Names;
 using SpecLint.Spec.Yaml;
 
 namespace SpecLint.Review.Reviewing;
@@ -93,7 +94,7 @@ internal sealed class WaiverReview
         }
         else if (!rules.TryGetValue(waiver.RuleId, out Rule? rule))
         {
-            problems.Add($"names no live rule{Expressions.NearestName.Suggestion(waiver.RuleId, rules.Keys.Order(StringComparer.Ordinal))}");
+            problems.Add($"names no live rule{NearestName.Suggestion(waiver.RuleId, rules.Keys.Order(StringComparer.Ordinal))}");
         }
         else if (rule.Source is RuleSource.Reading or RuleSource.Waivers)
         {

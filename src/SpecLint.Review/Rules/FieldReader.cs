@@ -1,5 +1,5 @@
 using System.Collections.Immutable;
-using SpecLint.Review.Expressions;
+using SpecLint.Spec.Names;
 using SpecLint.Spec.Yaml;
 
 namespace SpecLint.Review.Rules;

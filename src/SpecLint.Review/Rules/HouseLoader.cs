@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using SpecLint.Review.Expressions;
 using SpecLint.Review.Figures;
 using SpecLint.Review.Findings;
+using SpecLint.Spec.Names;
 using SpecLint.Spec.Yaml;
 
 namespace SpecLint.Review.Rules;

@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using SpecLint.Review.Expressions;
 using SpecLint.Review.Figures;
+using SpecLint.Spec.Names;
 using SpecLint.Spec.Units;
 using SpecLint.Spec.Yaml;
 

@@ -1,3 +1,4 @@
+using SpecLint.Spec.Names;
 using SpecLint.Spec.Schema;
 using SpecLint.Spec.Units;
 
@@ -40,7 +41,7 @@ internal static class FaultText
 
     internal static string NotAmong(SchemaNode node, string text)
     {
-        string meant = EditDistance.Nearest(text, node.Words) is { } near ? $"; is {near} meant?" : "";
+        string meant = NearestName.Of(text, node.Words) is { } near ? $"; is {near} meant?" : "";
         string others = node.Children.Length > 0 ? $", or a mapping with keys such as {string.Join(", ", node.Children.Take(3).Select(c => c.Name))}," : "";
         return $"is {Shown(text)}; {Either(node.Words)}{others} is expected{meant}";
     }

@@ -1,7 +1,7 @@
 using System.Collections.Immutable;
 using System.Diagnostics.CodeAnalysis;
 using System.Text;
-using SpecLint.Spec.Units;
+using SpecLint.Spec.Names;
 
 namespace SpecLint.Spec.Schema;
 
@@ -38,7 +38,7 @@ public static class KeyCatalogue
     /// <param name="key">A dotted key.</param>
     public static string? Nearest(string key)
     {
-        if (EditDistance.Nearest(key, Loaded.Value.ByKey.Keys) is { } near)
+        if (NearestName.Of(key, Loaded.Value.ByKey.Keys) is { } near)
         {
             return near;
         }

@@ -1,8 +1,8 @@
-using Newtonsoft.Json.Linq;
 using NJsonSchema;
 using NJsonSchema.Validation;
+using Newtonsoft.Json.Linq;
 using SpecLint.Spec.Documents;
-using SpecLint.Spec.Units;
+using SpecLint.Spec.Names;
 using SpecLint.Spec.Yaml;
 
 namespace SpecLint.Spec.Schema;
@@ -98,7 +98,7 @@ internal sealed class SchemaFaults(TokenTree tree)
         string where = parent.Length == 0 ? "of a spec" : $"of {parent}";
         string hint = "";
         string meant = "";
-        if (section is not null && EditDistance.Nearest(name, section.Children.Select(c => c.Name)) is { } near)
+        if (section is not null && NearestName.Of(name, section.Children.Select(c => c.Name)) is { } near)
         {
             meant = parent.Length == 0 ? near : $"{parent}.{near}";
             guessed.Add(meant);

@@ -1,6 +1,7 @@
 using System.Collections.Frozen;
 using System.Collections.Immutable;
 using System.Diagnostics.CodeAnalysis;
+using SpecLint.Spec.Names;
 
 namespace SpecLint.Spec.Units;
 

@@ -1,4 +1,4 @@
-namespace SpecLint.Spec.Units;
+namespace SpecLint.Spec.Names;
 
 /// <summary>How far two words lie apart: insertions, deletions, substitutions and swaps of neighbours.</summary>
 /// <seealso href="https://doi.org/10.1145/363958.363994">F. J. Damerau, A technique for computer detection and correction of spelling errors, 1964.</seealso>
@@ -23,25 +23,6 @@ internal static class EditDistance
         }
 
         return cost[a.Length, b.Length];
-    }
-
-    /// <summary>The nearest of some words, or null when none is near enough to be a slip of the keyboard.</summary>
-    internal static string? Nearest(string word, IEnumerable<string> words)
-    {
-        string lower = word.ToLowerInvariant().Replace('_', '-').Replace(' ', '-');
-        int allowed = Math.Max(1, (lower.Length + 1) / 3);
-        string? best = null;
-        foreach (string candidate in words)
-        {
-            int distance = Between(lower, candidate.ToLowerInvariant());
-            if (distance <= allowed && distance < candidate.Length)
-            {
-                allowed = distance - 1;
-                best = candidate;
-            }
-        }
-
-        return best;
     }
 
     private static int Cheapest(int[,] cost, string a, string b, int i, int j)
