@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using System.Numerics;
 using SpecLint.Physics.Geometry;
+using SpecLint.Physics.Numerics;
 
 namespace SpecLint.Physics.Electrical;
 
@@ -31,7 +32,7 @@ public static class CoilMutualInductance
         ArgumentOutOfRangeException.ThrowIfNegativeOrZero(coils);
         Span<double> integrals = new double[coils / 2 + 1];
         Span<double> near = integrals[..Math.Min(integrals.Length, FarthestSeparation + 1)];
-        double scale = CoilSelfInductance.Mu0 * turns * turns / (2.0 * Math.PI);
+        double scale = Magnetics.MagneticConstant.Mu0 * turns * turns / (2.0 * Math.PI);
         InductanceEstimate self = CoilSelfInductance.Of(coil, turns, planes);
         if (!double.IsFinite(self.Value) || coils > MostCoils)
         {
@@ -72,7 +73,7 @@ public static class CoilMutualInductance
             distances[separation] = separation * row.Pitch;
         }
 
-        double scale = CoilSelfInductance.Mu0 * turns * turns / (2.0 * Math.PI);
+        double scale = Magnetics.MagneticConstant.Mu0 * turns * turns / (2.0 * Math.PI);
         InductanceEstimate self = CoilSelfInductance.Of(coil, turns, planes);
         if (!double.IsFinite(self.Value) || row.Coils > MostCoils)
         {

@@ -7,9 +7,6 @@ namespace SpecLint.Physics.Electrical;
 /// <summary>Self inductance of a coreless coil of evenly spread turns, in air or between iron planes.</summary>
 public static class CoilSelfInductance
 {
-    /// <summary>Magnetic constant [H/m], classical value.</summary>
-    internal const double Mu0 = 4e-7 * Math.PI;
-
     private const double RelativeTolerance = 2e-5;
     private const int LeastPanels = 4;
     private const int MostPanels = 400;
@@ -35,7 +32,7 @@ public static class CoilSelfInductance
             return new InductanceEstimate(double.NaN, double.NaN);
         }
 
-        double scale = Mu0 * turns * turns / (2.0 * Math.PI);
+        double scale = Magnetics.MagneticConstant.Mu0 * turns * turns / (2.0 * Math.PI);
         InductanceEstimate integral = coil.Shape == CoilShape.Round
             ? OfRing(new RingTransform(coil), coil, planes)
             : OfTrapezoid(new TurnDensityTransform(coil, coil.PitchRadius), coil, planes);

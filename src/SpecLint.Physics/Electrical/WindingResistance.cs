@@ -1,3 +1,5 @@
+using SpecLint.Physics.Magnetics;
+
 namespace SpecLint.Physics.Electrical;
 
 /// <summary>Resistance, conductor mass, current density and skin depth.</summary>
@@ -45,5 +47,5 @@ public static class WindingResistance
     /// <returns>[m]: sqrt(2 rho/(omega mu0)), non-magnetic metal; infinity at rest.</returns>
     /// <seealso>Stoll, The Analysis of Eddy Currents, 1974, section 1 (from memory).</seealso>
     public static double SkinDepth(double resistivity, double electricalSpeed) =>
-        Math.Sqrt(2.0 * resistivity / (electricalSpeed * CoilSelfInductance.Mu0));
+        Math.Sqrt(2.0 * resistivity / (electricalSpeed * MagneticConstant.Mu0));
 }

@@ -1,3 +1,5 @@
+using SpecLint.Physics.Numerics;
+
 namespace SpecLint.Physics.Magnetics;
 
 /// <summary>A charge sheet seen from a distance: point charges at the Gauss nodes of its face.</summary>
@@ -21,7 +23,7 @@ internal sealed class ChargeCloud
             double a = u[i / order];
             double b = u[i % order];
             double share = 0.25 * weights[i / order] * weights[i % order];
-            (_x[i], _y[i], double density) = Place(magnets, a, b);
+            (_x[i], _y[i], double density) = MagnetFace.Place(magnets, a, b);
             _area[i] = share * density * magnets.FaceArea;
         }
     }
@@ -48,22 +50,5 @@ internal sealed class ChargeCloud
         }
 
         return (sumX, sumY, sum * dz);
-    }
-
-    private static (double X, double Y, double Density) Place(in MagnetGeometry g, double u, double v)
-    {
-        switch (g.Shape)
-        {
-            case MagnetShape.Block:
-                return (g.PitchRadius + (0.5 * g.Length * u), 0.5 * g.Width * v, 1.0);
-            case MagnetShape.Disc:
-                double share = 0.5 * (1.0 + u);
-                (double sine, double cosine) = Math.SinCos(Math.PI * v);
-                return (g.PitchRadius + (0.5 * g.Length * share * cosine), 0.5 * g.Length * share * sine, 2.0 * share);
-            default:
-                double r = g.PitchRadius + (0.5 * g.Length * u);
-                (double s, double c) = Math.SinCos(g.SectorHalfAngle * v);
-                return (r * c, r * s, r / g.PitchRadius);
-        }
     }
 }

@@ -1,3 +1,5 @@
+using SpecLint.Physics.Numerics;
+
 namespace SpecLint.Physics.Magnetics;
 
 /// <summary>One uniformly magnetised magnet alone in air.</summary>

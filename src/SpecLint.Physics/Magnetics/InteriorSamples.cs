@@ -1,4 +1,5 @@
 using System.Runtime.InteropServices;
+using SpecLint.Physics.Numerics;
 
 namespace SpecLint.Physics.Magnetics;
 
@@ -36,31 +37,12 @@ internal static class InteriorSamples
                 for (int b = 0; b < counts.Along; b++)
                 {
                     double weight = 0.125 * uWeights[a] * vWeights[b] * wWeights[q] * slope;
-                    (double x, double y, double density) = Place(magnets, u[a], 0.5 * (1.0 + v[b]));
+                    (double x, double y, double density) = MagnetFace.Place(magnets, u[a], 0.5 * (1.0 + v[b]));
                     samples[next++] = new Sample(x, y, -depth * layers.MagnetThickness, weight * density);
                 }
             }
         }
 
         return samples;
-    }
-
-    /// <summary>Maps the unit cell to the magnet's half face, with the density of area relative to the mean.</summary>
-    private static (double X, double Y, double Density) Place(in MagnetGeometry g, double u, double v)
-    {
-        switch (g.Shape)
-        {
-            case MagnetShape.Block:
-                return (g.PitchRadius + (0.5 * g.Length * u), 0.5 * g.Width * v, 1.0);
-            case MagnetShape.Disc:
-                double share = 0.5 * (1.0 + u);
-                (double sine, double cosine) = Math.SinCos(Math.PI * v);
-                double rho = 0.5 * g.Length * share;
-                return (g.PitchRadius + (rho * cosine), rho * sine, 2.0 * share);
-            default:
-                double r = g.PitchRadius + (0.5 * g.Length * u);
-                (double s, double c) = Math.SinCos(g.SectorHalfAngle * v);
-                return (r * c, r * s, r / g.PitchRadius);
-        }
     }
 }

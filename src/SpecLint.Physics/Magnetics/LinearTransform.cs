@@ -1,3 +1,5 @@
+using SpecLint.Physics.Numerics;
+
 namespace SpecLint.Physics.Magnetics;
 
 /// <summary>Two-dimensional Fourier transforms of magnet faces and turn densities about their own centres.</summary>
@@ -17,7 +19,7 @@ internal static class LinearTransform
         {
             double k = double.Hypot(kx, ky);
             double radius = 0.5 * magnets.Length;
-            return 2.0 * Math.PI * radius * BesselFunctions.J1(k * radius) / k;
+            return 2.0 * Math.PI * radius * FirstKindBessel.J1(k * radius) / k;
         }
 
         return magnets.Length * magnets.Width * Sinc(0.5 * kx * magnets.Width) * Sinc(0.5 * ky * magnets.Length);
@@ -32,7 +34,7 @@ internal static class LinearTransform
     {
         if (coil.Shape == CoilShape.Round)
         {
-            return BesselFunctions.RingMean(double.Hypot(kx, ky), coil.RingInnerRadius, coil.RingOuterRadius);
+            return Geometry.RingTurnDensity.Transform(double.Hypot(kx, ky), coil.RingInnerRadius, coil.RingOuterRadius);
         }
 
         // Mean over the turns u = 0..w of the rectangle (HoleWidth + 2u) by (HoleLength + 2u), product of sines expanded into cosines.

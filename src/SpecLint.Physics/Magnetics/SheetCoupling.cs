@@ -1,4 +1,5 @@
 using System.Runtime.InteropServices;
+using SpecLint.Physics.Numerics;
 
 namespace SpecLint.Physics.Magnetics;
 

@@ -1,3 +1,5 @@
+using SpecLint.Physics.Numerics;
+
 namespace SpecLint.Physics.Magnetics;
 
 /// <summary>Harmonics of the open-circuit field inside the winding, for fundamental amplitude and eddy loss.</summary>

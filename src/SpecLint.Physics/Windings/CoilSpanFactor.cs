@@ -1,23 +1,13 @@
 using MathNet.Numerics;
-using SpecLint.Physics.Electrical;
 using SpecLint.Physics.Geometry;
+using SpecLint.Physics.Numerics;
 
 namespace SpecLint.Physics.Windings;
 
 /// <summary>Share of a full-pitch, concentrated coil's linkage that one coil reaches, for any electrical order.</summary>
 public static class CoilSpanFactor
 {
-    private static readonly double[] Nodes =
-    [
-        -0.9739065285171717, -0.8650633666889845, -0.6794095682990244, -0.4333953941292472, -0.1488743389816312,
-        0.1488743389816312, 0.4333953941292472, 0.6794095682990244, 0.8650633666889845, 0.9739065285171717,
-    ];
-
-    private static readonly double[] Weights =
-    [
-        0.0666713443086881, 0.1494513491505806, 0.2190863625159820, 0.2692667193099964, 0.2955242247147529,
-        0.2955242247147529, 0.2692667193099964, 0.2190863625159820, 0.1494513491505806, 0.0666713443086881,
-    ];
+    private static readonly (double[] Nodes, double[] Weights) Rule = GaussLegendreRule.Create(10);
 
     /// <summary>Factor of a coil that spans whole slots.</summary>
     /// <param name="order">Electrical order, >= 1.</param>
@@ -55,10 +45,10 @@ public static class CoilSpanFactor
         double halfAngle = CoilGeometry.LegHalfAngle(coil);
         double start = coil.Shape == CoilShape.Keystone ? -0.5 * coil.LegWidth : 0.5 * coil.HoleWidth;
         double sum = 0.0;
-        for (int node = 0; node < Nodes.Length; node++)
+        for (int node = 0; node < Rule.Nodes.Length; node++)
         {
-            double offset = start + 0.5 * coil.LegWidth * (1.0 + Nodes[node]);
-            sum += Weights[node] * Math.Sin(order * polePairs * (halfAngle + Math.Asin(offset / radius)));
+            double offset = start + 0.5 * coil.LegWidth * (1.0 + Rule.Nodes[node]);
+            sum += Rule.Weights[node] * Math.Sin(order * polePairs * (halfAngle + Math.Asin(offset / radius)));
         }
 
         return 0.5 * sum;
@@ -90,10 +80,10 @@ public static class CoilSpanFactor
     {
         double inner = 0.5 * coil.HoleWidth;
         double sum = 0.0;
-        for (int node = 0; node < Nodes.Length; node++)
+        for (int node = 0; node < Rule.Nodes.Length; node++)
         {
-            double radius = inner + 0.5 * coil.LegWidth * (1.0 + Nodes[node]);
-            sum += 0.5 * Weights[node] * radius * FirstKindBessel.J1(waveNumber * radius);
+            double radius = inner + 0.5 * coil.LegWidth * (1.0 + Rule.Nodes[node]);
+            sum += 0.5 * Rule.Weights[node] * radius * FirstKindBessel.J1(waveNumber * radius);
         }
 
         return 0.5 * Math.PI * sum / (inner + 0.5 * coil.LegWidth);

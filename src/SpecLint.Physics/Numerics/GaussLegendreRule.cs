@@ -1,4 +1,4 @@
-namespace SpecLint.Physics.Magnetics;
+namespace SpecLint.Physics.Numerics;
 
 /// <summary>Nodes and weights of Gauss-Legendre quadrature on [-1, 1].</summary>
 internal static class GaussLegendreRule
