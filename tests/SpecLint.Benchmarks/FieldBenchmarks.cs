@@ -1,4 +1,5 @@
 using BenchmarkDotNet.Attributes;
+using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Magnetics;
 
 namespace SpecLint.Benchmarks;
@@ -7,8 +8,12 @@ namespace SpecLint.Benchmarks;
 [MemoryDiagnoser]
 public class FieldBenchmarks
 {
-    private static readonly MagnetGeometry Magnets = MagnetGeometry.AxialBlock(6, 0.12, 0.046, 0.03);
-    private static readonly CoilGeometry Coil = CoilGeometry.Keystone(0.12, 0.046, 0.026, 0.016);
+    private static readonly MagnetRow Magnets = MagnetRow.AxialBlock(6, 0.12, 0.046, 0.03);
+    private static readonly CoilOutline Coil = new()
+    {
+        Shape = CoilShape.Keystone, HoleLength = 0.046, HoleWidth = 0.026, LegWidth = 0.016, Thickness = 0.013, PitchRadius = 0.12,
+    };
+
     private static readonly CoilLayer Layer = new() { MidHeight = 0.0085, Thickness = 0.013 };
     private static readonly SteelPlate Steel = new() { Thickness = 0.008, RelativePermeability = 1000.0 };
 

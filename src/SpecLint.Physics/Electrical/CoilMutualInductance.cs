@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using System.Numerics;
 using SpecLint.Physics.Geometry;
+using SpecLint.Physics.Magnetics;
 using SpecLint.Physics.Numerics;
 
 namespace SpecLint.Physics.Electrical;
@@ -32,7 +33,7 @@ public static class CoilMutualInductance
         ArgumentOutOfRangeException.ThrowIfNegativeOrZero(coils);
         Span<double> integrals = new double[coils / 2 + 1];
         Span<double> near = integrals[..Math.Min(integrals.Length, FarthestSeparation + 1)];
-        double scale = Magnetics.MagneticConstant.Mu0 * turns * turns / (2.0 * Math.PI);
+        double scale = MagneticConstant.Mu0 * turns * turns / (2.0 * Math.PI);
         InductanceEstimate self = CoilSelfInductance.Of(coil, turns, planes);
         if (!double.IsFinite(self.Value) || coils > MostCoils)
         {
@@ -73,7 +74,7 @@ public static class CoilMutualInductance
             distances[separation] = separation * row.Pitch;
         }
 
-        double scale = Magnetics.MagneticConstant.Mu0 * turns * turns / (2.0 * Math.PI);
+        double scale = MagneticConstant.Mu0 * turns * turns / (2.0 * Math.PI);
         InductanceEstimate self = CoilSelfInductance.Of(coil, turns, planes);
         if (!double.IsFinite(self.Value) || row.Coils > MostCoils)
         {

@@ -1,6 +1,7 @@
 using System.Numerics;
 using System.Runtime.InteropServices;
 using SpecLint.Physics.Geometry;
+using SpecLint.Physics.Magnetics;
 
 namespace SpecLint.Physics.Electrical;
 
@@ -32,7 +33,7 @@ public static class CoilSelfInductance
             return new InductanceEstimate(double.NaN, double.NaN);
         }
 
-        double scale = Magnetics.MagneticConstant.Mu0 * turns * turns / (2.0 * Math.PI);
+        double scale = MagneticConstant.Mu0 * turns * turns / (2.0 * Math.PI);
         InductanceEstimate integral = coil.Shape == CoilShape.Round
             ? OfRing(new RingTransform(coil), coil, planes)
             : OfTrapezoid(new TurnDensityTransform(coil, coil.PitchRadius), coil, planes);

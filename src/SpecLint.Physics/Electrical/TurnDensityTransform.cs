@@ -6,9 +6,7 @@ namespace SpecLint.Physics.Electrical;
 
 /// <summary>Fourier transform of the turn density of a keystone or rectangular coil with mitred turns.</summary>
 /// <remarks>
-/// W is 1 in the hole and falls linearly to 0 across the leg, so its Laplacian lives on the crease lines only: with jump g of
-/// the normal slope, -k² W^(k) is the sum of g times the line's transform. g is -1/w on the four hole edges, +1/w on the
-/// four outer edges, and -|n2 - n1|/w on the four mitres between sides with outward normals n1 and n2.
+/// -k² W^(k) is the sum over the <see cref="CoilCreases"/> of the jump of the normal slope times the line\'s transform.
 /// The corners come in mirrored pairs, so four phases are enough for eight corners.
 /// </remarks>
 [StructLayout(LayoutKind.Auto)]
@@ -17,13 +15,7 @@ internal readonly struct TurnDensityTransform
     private const double SmallPhase = 1e-4;
     private const double LongWave = 1e-3;
 
-    private readonly PlanePoint _holeInner;
-    private readonly PlanePoint _holeOuter;
-    private readonly PlanePoint _rimInner;
-    private readonly PlanePoint _rimOuter;
-    private readonly double _slope;
-    private readonly double _innerMitre;
-    private readonly double _outerMitre;
+    private readonly CoilCreases _creases;
     private readonly double _reach;
 
     /// <summary>Prepares a coil, its coordinates counted from a point on the coil axis.</summary>
@@ -31,18 +23,12 @@ internal readonly struct TurnDensityTransform
     /// <param name="origin">Distance of the origin from the shaft axis [m].</param>
     public TurnDensityTransform(in CoilOutline coil, double origin)
     {
-        var trapezoid = new CoilTrapezoid(coil);
-        _holeInner = Shift(trapezoid.InnerCorner(0.0), origin);
-        _holeOuter = Shift(trapezoid.OuterCorner(0.0), origin);
-        _rimInner = Shift(trapezoid.InnerCorner(coil.LegWidth), origin);
-        _rimOuter = Shift(trapezoid.OuterCorner(coil.LegWidth), origin);
-        _slope = 1.0 / coil.LegWidth;
-        _innerMitre = _slope * 2.0 * Math.Sin(0.5 * (0.5 * Math.PI - trapezoid.HalfAngle));
-        _outerMitre = _slope * 2.0 * Math.Sin(0.5 * (0.5 * Math.PI + trapezoid.HalfAngle));
-        _reach = Math.Max(_rimInner.Radius, _rimOuter.Radius);
+        _creases = new CoilCreases(coil, origin);
+        _reach = _creases.Reach;
+        double halfAngle = CoilGeometry.LegHalfAngle(coil);
         Volume = coil.HoleLength * coil.HoleWidth
             + 0.5 * coil.LegWidth * CoilGeometry.MeanTurnLength(coil with { CornerRadius = null })
-            - coil.LegWidth * coil.LegWidth * CornerArea(trapezoid.HalfAngle);
+            - coil.LegWidth * coil.LegWidth * CornerArea(halfAngle);
     }
 
     /// <summary>Largest distance of the contour from the origin [m].</summary>
@@ -57,11 +43,11 @@ internal readonly struct TurnDensityTransform
     {
         get
         {
-            double edges = 2.0 * (_holeInner.Along + _holeOuter.Along + _rimInner.Along + _rimOuter.Along
-                + Distance(_holeInner, _holeOuter) + Distance(_rimInner, _rimOuter));
-            double mitres = 2.0 * (_innerMitre * _innerMitre * Distance(_holeInner, _rimInner)
-                + _outerMitre * _outerMitre * Distance(_holeOuter, _rimOuter));
-            return 2.0 * (_slope * _slope * edges + mitres);
+            double edges = 2.0 * (_creases.HoleInner.Along + _creases.HoleOuter.Along + _creases.RimInner.Along + _creases.RimOuter.Along
+                + _creases.HoleLeg + _creases.RimLeg);
+            double mitres = 2.0 * (_creases.InnerMitreJump * _creases.InnerMitreJump * _creases.InnerMitre
+                + _creases.OuterMitreJump * _creases.OuterMitreJump * _creases.OuterMitre);
+            return 2.0 * (_creases.Slope * _creases.Slope * edges + mitres);
         }
     }
 
@@ -77,22 +63,22 @@ internal readonly struct TurnDensityTransform
             return Volume;
         }
 
-        Pair holeInner = Phases(_holeInner, across, along);
-        Pair holeOuter = Phases(_holeOuter, across, along);
-        Pair rimInner = Phases(_rimInner, across, along);
-        Pair rimOuter = Phases(_rimOuter, across, along);
-        Complex edges = Bar(_rimInner, rimInner, along) + Bar(_rimOuter, rimOuter, along)
-            - Bar(_holeInner, holeInner, along) - Bar(_holeOuter, holeOuter, along)
-            + Sides(_rimInner, _rimOuter, rimInner, rimOuter, across, along)
-            - Sides(_holeInner, _holeOuter, holeInner, holeOuter, across, along);
-        Complex mitres = _innerMitre * Sides(_holeInner, _rimInner, holeInner, rimInner, across, along)
-            + _outerMitre * Sides(_holeOuter, _rimOuter, holeOuter, rimOuter, across, along);
-        return (mitres - _slope * edges) / square;
+        PlanePoint holeInner = _creases.HoleInner;
+        PlanePoint holeOuter = _creases.HoleOuter;
+        PlanePoint rimInner = _creases.RimInner;
+        PlanePoint rimOuter = _creases.RimOuter;
+        Pair atHoleInner = Phases(holeInner, across, along);
+        Pair atHoleOuter = Phases(holeOuter, across, along);
+        Pair atRimInner = Phases(rimInner, across, along);
+        Pair atRimOuter = Phases(rimOuter, across, along);
+        Complex edges = Bar(rimInner, atRimInner, along) + Bar(rimOuter, atRimOuter, along)
+            - Bar(holeInner, atHoleInner, along) - Bar(holeOuter, atHoleOuter, along)
+            + (_creases.RimLeg * Sides(rimInner, rimOuter, atRimInner, atRimOuter, across, along))
+            - (_creases.HoleLeg * Sides(holeInner, holeOuter, atHoleInner, atHoleOuter, across, along));
+        Complex mitres = (_creases.InnerMitreJump * _creases.InnerMitre) * Sides(holeInner, rimInner, atHoleInner, atRimInner, across, along)
+            + (_creases.OuterMitreJump * _creases.OuterMitre) * Sides(holeOuter, rimOuter, atHoleOuter, atRimOuter, across, along);
+        return (mitres - _creases.Slope * edges) / square;
     }
-
-    private static PlanePoint Shift(PlanePoint point, double origin) => point with { Across = point.Across - origin };
-
-    private static double Distance(PlanePoint from, PlanePoint to) => double.Hypot(to.Across - from.Across, to.Along - from.Along);
 
     // Pyramid correction at the four corners: turns of depth s enclose A0 + L0 s + (sum of tan(exterior/2)) s².
     private static double CornerArea(double halfAngle) =>
@@ -110,12 +96,12 @@ internal readonly struct TurnDensityTransform
     private static Complex Bar(PlanePoint corner, Pair phases, double along) =>
         Line(2.0 * corner.Along, 2.0 * along * corner.Along, phases.Minus, phases.Plus);
 
+    // Of unit length: the two mirrored lines from corner to corner.
     private static Complex Sides(PlanePoint from, PlanePoint to, Pair start, Pair end, double across, double along)
     {
-        double length = Distance(from, to);
         double advanceX = across * (to.Across - from.Across);
         double advanceY = along * (to.Along - from.Along);
-        return Line(length, advanceX + advanceY, start.Plus, end.Plus) + Line(length, advanceX - advanceY, start.Minus, end.Minus);
+        return Line(1.0, advanceX + advanceY, start.Plus, end.Plus) + Line(1.0, advanceX - advanceY, start.Minus, end.Minus);
     }
 
     // Integral of exp(-j phase) along a line whose phase advances evenly: (start - end)/(j advance), by series when the advance is small.

@@ -12,7 +12,7 @@ internal sealed class ChargeCloud
     /// <summary>Spreads a magnet's face over points.</summary>
     /// <param name="magnets">The magnets.</param>
     /// <param name="order">Nodes in each direction.</param>
-    public ChargeCloud(in MagnetGeometry magnets, int order)
+    public ChargeCloud(in MagnetRow magnets, int order)
     {
         (double[] u, double[] weights) = GaussLegendreRule.Create(order);
         _x = new double[order * order];

@@ -1,3 +1,5 @@
+using SpecLint.Physics.Geometry;
+
 namespace SpecLint.Physics.Magnetics;
 
 /// <summary>Spectrum of a coil's turn density for the harmonics 1, 3, ... 15; depends on the coil's outline and the pole pairs only.</summary>
@@ -10,22 +12,22 @@ public sealed class CoilTransform
     private readonly List<double[]> _blocks = [];
 
     /// <summary>Prepares the spectrum of a coil.</summary>
-    /// <param name="geometry">The coil; its <see cref="CoilGeometry.DomainFault"/> must be null.</param>
+    /// <param name="coil">Buildable outline; its thickness and corner radius are not used, turns are mitred sharp.</param>
     /// <param name="grid">The wave-number grid, shared with the magnets.</param>
-    /// <exception cref="ArgumentException">The geometry is outside the model's domain.</exception>
-    public CoilTransform(CoilGeometry geometry, WaveNumberGrid grid)
+    /// <exception cref="ArgumentException">The outline is not buildable.</exception>
+    public CoilTransform(CoilOutline coil, WaveNumberGrid grid)
     {
-        if (geometry.DomainFault is { } fault)
+        if (!CoilGeometry.IsBuildable(coil))
         {
-            throw new ArgumentException(fault, nameof(geometry));
+            throw new ArgumentException("the outline does not enclose a hole", nameof(coil));
         }
 
-        Geometry = geometry;
+        Outline = coil;
         Grid = grid;
     }
 
     /// <summary>The coil.</summary>
-    public CoilGeometry Geometry { get; }
+    public CoilOutline Outline { get; }
 
     /// <summary>The wave-number grid.</summary>
     public WaveNumberGrid Grid { get; }
@@ -46,9 +48,9 @@ public sealed class CoilTransform
 
     private double[] AxialBlock(int block)
     {
-        IPlaneTransform transform = Geometry.Shape == CoilShape.Round
-            ? RoundTransform.Ring(Geometry.CentreRadius, Geometry.RingInnerRadius, Geometry.RingOuterRadius)
-            : new CreaseTransform(Geometry);
+        IPlaneTransform transform = Outline.Shape == CoilShape.Round
+            ? RoundTransform.Ring(Outline.PitchRadius, 0.5 * Outline.HoleWidth, (0.5 * Outline.HoleWidth) + Outline.LegWidth)
+            : new CreaseTransform(Outline);
         return AngularProjection.Project(transform, Grid.PolePairs, FluxLinkageHarmonics.Count, new PhaseTable(Grid, block));
     }
 
@@ -62,7 +64,7 @@ public sealed class CoilTransform
             double kx = ((2 * j) + 1) * Math.PI / Grid.PolePitch;
             for (int i = 0; i < Nodes; i++)
             {
-                all[(j * Nodes) + i] = LinearTransform.Coil(Geometry, kx, across[i]);
+                all[(j * Nodes) + i] = LinearTransform.Coil(Outline, kx, across[i]);
             }
         }
 

@@ -29,8 +29,8 @@ internal static class CoilWeightedDemagnetisation
     /// <returns>The factor [-], to about 1 %.</returns>
     public static double Factor(MagnetTransform magnets, CoilTransform coil, MagneticLayers ideal, CoilLayer layer)
     {
-        InteriorField field = new(magnets.Geometry, ideal);
-        InteriorSamples.Sample[] samples = InteriorSamples.List(magnets.Geometry, ideal, Counts);
+        InteriorField field = new(magnets.Row, ideal);
+        InteriorSamples.Sample[] samples = InteriorSamples.List(magnets.Row, ideal, Counts);
         int perLevel = samples.Length / Counts.Through;
         double[] potential = new double[Radii * Counts.Through];
         double[] normal = new double[Radii * Counts.Through];

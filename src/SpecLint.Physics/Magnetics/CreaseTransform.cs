@@ -1,11 +1,12 @@
+using SpecLint.Physics.Geometry;
+
 namespace SpecLint.Physics.Magnetics;
 
 /// <summary>Transform of the turn density of a keystone or rectangular coil.</summary>
 /// <remarks>
-/// The turn density is a pyramid frustum: constant in the hole, falling linearly across the leg. Its Laplacian is concentrated on its
-/// twelve crease lines, with the jump of the gradient as strength (hole edges -1/w, outer edges 1/w, mitres -|n2 - n1|/w), so minus k^2
-/// times the transform is the sum of the line transforms, each a difference of the phases of the line's ends over the difference of
-/// their path. Collected by corners this is one phase per corner with a weight that does not depend on k.
+/// Minus k^2 times the transform is the sum over the <see cref="CoilCreases"/> of jump times line transform, each line transform a
+/// difference of the phases of the line's ends over the difference of their path. Collected by corners this is one phase per corner
+/// with a weight that does not depend on k.
 /// Source: transform of a polygon by its edges, Lee S.-W., Mittra R., IEEE Trans. Antennas Propag. 31(1), 1983, 99-103, applied to the Laplacian.
 /// </remarks>
 internal sealed class CreaseTransform : IPlaneTransform
@@ -14,19 +15,25 @@ internal sealed class CreaseTransform : IPlaneTransform
     private const double GrazingLimit = 1e-7;
 
     private const double Nudge = 1e-6;
-    private readonly CoilOutline _outline;
-    private readonly CreaseStrengths _strengths;
+    private readonly CoilCreases _creases;
+    private readonly double _holeLeg;
+    private readonly double _outerLeg;
+    private readonly double _innerMitre;
+    private readonly double _outerMitre;
 
     /// <summary>Describes the coil.</summary>
-    /// <param name="coil">A keystone or rectangle.</param>
-    public CreaseTransform(in CoilGeometry coil)
+    /// <param name="coil">A keystone or rectangle; a corner radius is left out.</param>
+    public CreaseTransform(in CoilOutline coil)
     {
-        _outline = CoilOutline.Of(coil);
-        _strengths = CreaseStrengths.Of(_outline);
+        _creases = new CoilCreases(coil, 0.0);
+        _holeLeg = -_creases.Slope * _creases.HoleLeg;
+        _outerLeg = _creases.Slope * _creases.RimLeg;
+        _innerMitre = -_creases.InnerMitreJump * _creases.InnerMitre;
+        _outerMitre = -_creases.OuterMitreJump * _creases.OuterMitre;
     }
 
     /// <inheritdoc/>
-    public double Reach => double.Hypot(_outline.OuterEndOuter, _outline.OuterEndOuterHalfWidth);
+    public double Reach => _creases.RimOuter.Radius;
 
     /// <inheritdoc/>
     public void Sample((double Cosine, double Sine) direction, bool odd, PhaseTable table, Span<double> value)
@@ -66,26 +73,26 @@ internal sealed class CreaseTransform : IPlaneTransform
     {
         for (int attempt = 0; attempt < 2; attempt++)
         {
-            path[0] = (c * _outline.InnerEnd) + (s * _outline.InnerEndHalfWidth);
-            path[1] = (c * _outline.OuterEnd) + (s * _outline.OuterEndHalfWidth);
-            path[2] = (c * _outline.InnerEndOuter) + (s * _outline.InnerEndOuterHalfWidth);
-            path[3] = (c * _outline.OuterEndOuter) + (s * _outline.OuterEndOuterHalfWidth);
+            path[0] = (c * _creases.HoleInner.Across) + (s * _creases.HoleInner.Along);
+            path[1] = (c * _creases.HoleOuter.Across) + (s * _creases.HoleOuter.Along);
+            path[2] = (c * _creases.RimInner.Across) + (s * _creases.RimInner.Along);
+            path[3] = (c * _creases.RimOuter.Across) + (s * _creases.RimOuter.Along);
             double hole = path[1] - path[0];
             double outer = path[3] - path[2];
             double innerMitre = path[2] - path[0];
             double outerMitre = path[3] - path[1];
             double least = Math.Min(Math.Min(Math.Abs(hole), Math.Abs(outer)), Math.Min(Math.Abs(innerMitre), Math.Abs(outerMitre)));
-            if (attempt == 0 && least < GrazingLimit * _outline.LegWidth)
+            if (attempt == 0 && least * _creases.Slope < GrazingLimit)
             {
                 (c, s) = (c - (Nudge * s), s + (Nudge * c));
                 continue;
             }
 
-            double bar = 1.0 / (_outline.LegWidth * s);
-            double holeLeg = _strengths.HoleLeg / hole;
-            double outerLeg = _strengths.OuterLeg / outer;
-            double atInner = _strengths.InnerMitre / innerMitre;
-            double atOuter = _strengths.OuterMitre / outerMitre;
+            double bar = _creases.Slope / s;
+            double holeLeg = _holeLeg / hole;
+            double outerLeg = _outerLeg / outer;
+            double atInner = _innerMitre / innerMitre;
+            double atOuter = _outerMitre / outerMitre;
             weight[0] = -bar - holeLeg - atInner;
             weight[1] = -bar + holeLeg - atOuter;
             weight[2] = bar - outerLeg + atInner;

@@ -16,18 +16,18 @@ public readonly record struct DemagnetisingField
     public required double ExceededInOnePercent { get; init; }
 
     /// <summary>Computes the field of one magnet.</summary>
-    /// <param name="magnets">The magnets; their <see cref="MagnetGeometry.DomainFault"/> must be null.</param>
+    /// <param name="magnets">The magnets; their <see cref="MagnetRow.DomainFault"/> must be null.</param>
     /// <param name="layers">The layers; steel counts as ideal.</param>
     /// <returns>Mean to about 0.5 %, the value of the worst hundredth to about 1 % of the remanence.</returns>
     /// <seealso>Magnetic charge with images, as in <see cref="ImageField"/>.</seealso>
-    public static DemagnetisingField Of(MagnetGeometry magnets, MagneticLayers layers) => Of(magnets, layers, Standard);
+    public static DemagnetisingField Of(MagnetRow magnets, MagneticLayers layers) => Of(magnets, layers, Standard);
 
     /// <summary>Computes the field of one magnet with a given sampling.</summary>
     /// <param name="magnets">The magnets.</param>
     /// <param name="layers">The layers.</param>
     /// <param name="counts">Numbers of sampling points.</param>
     /// <returns>Mean and worst hundredth.</returns>
-    internal static DemagnetisingField Of(MagnetGeometry magnets, MagneticLayers layers, InteriorSamples.Counts counts)
+    internal static DemagnetisingField Of(MagnetRow magnets, MagneticLayers layers, InteriorSamples.Counts counts)
     {
         InteriorField field = new(magnets, layers);
         InteriorSamples.Sample[] samples = InteriorSamples.List(magnets, layers, counts);

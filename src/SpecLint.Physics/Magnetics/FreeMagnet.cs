@@ -1,3 +1,4 @@
+using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Numerics;
 
 namespace SpecLint.Physics.Magnetics;
@@ -125,7 +126,7 @@ public static class FreeMagnet
     /// <returns>Linkage per turn [Wb], positive over the north face; its derivative by the displacement gives the EMF of a sweep.</returns>
     /// <remarks>Mean over the turns by Gauss quadrature of closed forms; to about 1e-5 unless the coil touches the face.</remarks>
     /// <seealso>Akoun G., Yonnet J.-P., IEEE Trans. Magn. 20(5), 1984, 1962-1964.</seealso>
-    public static double BlockFluxThroughCoil(in FreeBlock block, in CoilGeometry coil, in CoilLayer layer, double displacement)
+    public static double BlockFluxThroughCoil(in FreeBlock block, in CoilOutline coil, in CoilLayer layer, double displacement)
     {
         double sum = 0.0;
         for (int i = 0; i < TurnRule.Nodes.Length; i++)

@@ -1,4 +1,5 @@
 using System.Runtime.InteropServices;
+using SpecLint.Physics.Geometry;
 
 namespace SpecLint.Physics.Magnetics;
 
@@ -36,9 +37,9 @@ public sealed class ImageField
     private readonly ChargeCloud _sparse;
 
     /// <summary>Prepares the sheets of an array.</summary>
-    /// <param name="magnets">The magnets; their <see cref="MagnetGeometry.DomainFault"/> must be null.</param>
+    /// <param name="magnets">The magnets; their <see cref="MagnetRow.DomainFault"/> must be null.</param>
     /// <param name="layers">The layers; steel is taken as ideal and the recoil permeability as 1.</param>
-    public ImageField(MagnetGeometry magnets, MagneticLayers layers)
+    public ImageField(MagnetRow magnets, MagneticLayers layers)
         : this(magnets, layers, DampingExponent, FarthestPole, 0.0)
     {
     }
@@ -49,7 +50,7 @@ public sealed class ImageField
     /// <param name="dampingExponent">Exponent at which the image sum ends.</param>
     /// <param name="farthestPole">Poles to either side that are summed.</param>
     /// <param name="nearDistance">Sheets of the magnet and its neighbours this near to the magnet's body count as near [m].</param>
-    internal ImageField(MagnetGeometry magnets, MagneticLayers layers, double dampingExponent, int farthestPole, double nearDistance)
+    internal ImageField(MagnetRow magnets, MagneticLayers layers, double dampingExponent, int farthestPole, double nearDistance)
     {
         _dampingExponent = dampingExponent;
         _farthestPole = farthestPole;
@@ -69,7 +70,7 @@ public sealed class ImageField
     }
 
     /// <summary>The magnets.</summary>
-    public MagnetGeometry Magnets { get; }
+    public MagnetRow Magnets { get; }
 
     /// <summary>The layers.</summary>
     public MagneticLayers Layers { get; }

@@ -1,4 +1,5 @@
 using System.Runtime.InteropServices;
+using SpecLint.Physics.Geometry;
 
 namespace SpecLint.Physics.Magnetics;
 
@@ -25,7 +26,7 @@ internal sealed class InteriorField
     /// <summary>Prepares the field inside magnet 0.</summary>
     /// <param name="magnets">The magnets.</param>
     /// <param name="layers">The layers.</param>
-    public InteriorField(MagnetGeometry magnets, MagneticLayers layers)
+    public InteriorField(MagnetRow magnets, MagneticLayers layers)
     {
         double breadth = magnets.Shape == MagnetShape.Sector
             ? Math.Min(magnets.Length, 2.0 * magnets.SectorHalfAngle * magnets.PitchRadius)

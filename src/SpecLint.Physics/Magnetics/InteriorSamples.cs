@@ -19,7 +19,7 @@ internal static class InteriorSamples
     /// <param name="layers">The layers.</param>
     /// <param name="counts">Numbers of points.</param>
     /// <returns>Points with positive y and weights that sum to 1; dense toward every free face.</returns>
-    public static Sample[] List(in MagnetGeometry magnets, in MagneticLayers layers, Counts counts)
+    public static Sample[] List(in MagnetRow magnets, in MagneticLayers layers, Counts counts)
     {
         (double[] u, double[] uWeights) = GaussLegendreRule.Create(counts.Radial);
         (double[] v, double[] vWeights) = GaussLegendreRule.Create(counts.Along);

@@ -1,3 +1,4 @@
+using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Numerics;
 
 namespace SpecLint.Physics.Magnetics;
@@ -13,7 +14,7 @@ internal static class LinearTransform
     /// <param name="kx">Wave number along the travel [1/m].</param>
     /// <param name="ky">Wave number across the travel [1/m].</param>
     /// <returns>The transform [m^2].</returns>
-    public static double Magnet(in MagnetGeometry magnets, double kx, double ky)
+    public static double Magnet(in MagnetRow magnets, double kx, double ky)
     {
         if (magnets.Shape == MagnetShape.Disc)
         {
@@ -30,11 +31,11 @@ internal static class LinearTransform
     /// <param name="kx">Wave number along the travel [1/m].</param>
     /// <param name="ky">Wave number across the travel [1/m].</param>
     /// <returns>The transform [m^2].</returns>
-    public static double Coil(in CoilGeometry coil, double kx, double ky)
+    public static double Coil(in CoilOutline coil, double kx, double ky)
     {
         if (coil.Shape == CoilShape.Round)
         {
-            return Geometry.RingTurnDensity.Transform(double.Hypot(kx, ky), coil.RingInnerRadius, coil.RingOuterRadius);
+            return RingTurnDensity.Transform(double.Hypot(kx, ky), 0.5 * coil.HoleWidth, (0.5 * coil.HoleWidth) + coil.LegWidth);
         }
 
         // Mean over the turns u = 0..w of the rectangle (HoleWidth + 2u) by (HoleLength + 2u), product of sines expanded into cosines.

@@ -1,3 +1,5 @@
+using SpecLint.Physics.Geometry;
+
 namespace SpecLint.Physics.Magnetics;
 
 /// <summary>Maps the unit square onto a magnet's face, for quadrature.</summary>
@@ -8,7 +10,7 @@ internal static class MagnetFace
     /// <param name="u">Place along the radius [-], -1 to 1.</param>
     /// <param name="v">Place along the motion [-], -1 to 1; negative is the mirror image.</param>
    
-    public static (double X, double Y, double Density) Place(in MagnetGeometry g, double u, double v)
+    public static (double X, double Y, double Density) Place(in MagnetRow g, double u, double v)
     {
         switch (g.Shape)
         {

@@ -1,3 +1,5 @@
+using SpecLint.Physics.Geometry;
+
 namespace SpecLint.Physics.Magnetics;
 
 /// <summary>Spectrum of the magnetisation of an alternating magnet array; depends on the outline and arrangement only.</summary>
@@ -19,27 +21,27 @@ public sealed class MagnetTransform
     private readonly List<double[]> _interior = [];
 
     /// <summary>Prepares the spectrum of a magnet array.</summary>
-    /// <param name="geometry">The magnets; their <see cref="MagnetGeometry.DomainFault"/> must be null.</param>
+    /// <param name="row">The magnets; their <see cref="MagnetRow.DomainFault"/> must be null.</param>
     /// <param name="grid">The wave-number grid, shared with the coil.</param>
     /// <exception cref="ArgumentException">The geometry is outside the model's domain, or the grid belongs to another kind of machine.</exception>
-    public MagnetTransform(MagnetGeometry geometry, WaveNumberGrid grid)
+    public MagnetTransform(MagnetRow row, WaveNumberGrid grid)
     {
-        if (geometry.DomainFault is { } fault)
+        if (row.DomainFault is { } fault)
         {
-            throw new ArgumentException(fault, nameof(geometry));
+            throw new ArgumentException(fault, nameof(row));
         }
 
-        if (geometry.PolePairs != grid.PolePairs)
+        if (row.PolePairs != grid.PolePairs)
         {
             throw new ArgumentException("the grid serves another number of pole pairs", nameof(grid));
         }
 
-        Geometry = geometry;
+        Row = row;
         Grid = grid;
     }
 
     /// <summary>The magnets.</summary>
-    public MagnetGeometry Geometry { get; }
+    public MagnetRow Row { get; }
 
     /// <summary>The wave-number grid.</summary>
     public WaveNumberGrid Grid { get; }
@@ -49,7 +51,7 @@ public sealed class MagnetTransform
     /// <returns>The number; a linear row has no bound and returns the largest integer.</returns>
     internal int HarmonicCount(int block) => Grid.IsLinear
         ? int.MaxValue
-        : Math.Max(FluxLinkageHarmonics.Count, AngularProjection.ResolvedHarmonics(Grid.PolePairs, (block + 1) * Grid.BlockWidth * Geometry.Reach));
+        : Math.Max(FluxLinkageHarmonics.Count, AngularProjection.ResolvedHarmonics(Grid.PolePairs, (block + 1) * Grid.BlockWidth * Row.Reach));
 
     /// <summary>Coefficients of one harmonic over one block.</summary>
     /// <param name="block">Block number.</param>
@@ -82,8 +84,8 @@ public sealed class MagnetTransform
     /// <returns>Chebyshev nodes over the magnet, ascending.</returns>
     internal double[] InteriorRadii()
     {
-        double inner = Geometry.IsLinear ? 0.0 : Geometry.Shape == MagnetShape.Sector ? Geometry.InnerRadius : Geometry.PitchRadius - (0.5 * Geometry.Length);
-        double outer = Geometry.Reach;
+        double inner = Row.IsLinear ? 0.0 : Row.Shape == MagnetShape.Sector ? Row.InnerRadius : Row.PitchRadius - (0.5 * Row.Length);
+        double outer = Row.Reach;
         double[] radii = new double[InteriorNodes];
         for (int i = 0; i < InteriorNodes; i++)
         {
@@ -130,7 +132,7 @@ public sealed class MagnetTransform
         double kx = ((2 * index) + 1) * Math.PI / Grid.PolePitch;
         for (int i = 0; i < Nodes; i++)
         {
-            line[i] = 2.0 * LinearTransform.Magnet(Geometry, kx, across[i]) / Grid.PolePitch;
+            line[i] = 2.0 * LinearTransform.Magnet(Row, kx, across[i]) / Grid.PolePitch;
         }
 
         return line;
@@ -138,11 +140,11 @@ public sealed class MagnetTransform
 
     private void AddAxialLines(int block, List<double[]> lines)
     {
-        IPlaneTransform transform = Geometry.Shape switch
+        IPlaneTransform transform = Row.Shape switch
         {
-            MagnetShape.Block => new BlockTransform(Geometry.PitchRadius, Geometry.Length, Geometry.Width),
-            MagnetShape.Disc => RoundTransform.Disc(Geometry.PitchRadius, 0.5 * Geometry.Length),
-            _ => new SectorTransform(Geometry.InnerRadius, Geometry.OuterRadius, Geometry.SectorHalfAngle),
+            MagnetShape.Block => new BlockTransform(Row.PitchRadius, Row.Length, Row.Width),
+            MagnetShape.Disc => RoundTransform.Disc(Row.PitchRadius, 0.5 * Row.Length),
+            _ => new SectorTransform(Row.InnerRadius, Row.OuterRadius, Row.SectorHalfAngle),
         };
         int harmonics = HarmonicCount(block);
         double[] all = AngularProjection.Project(transform, Grid.PolePairs, harmonics, new PhaseTable(Grid, block));

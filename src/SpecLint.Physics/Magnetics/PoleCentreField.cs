@@ -19,7 +19,7 @@ public sealed class PoleCentreField
     {
         ArgumentNullException.ThrowIfNull(field);
         _field = field;
-        _image = new ImageField(field.Magnets.Geometry, field.Stack);
+        _image = new ImageField(field.Magnets.Row, field.Stack);
     }
 
     /// <summary>Normal flux density at one height.</summary>
@@ -27,7 +27,7 @@ public sealed class PoleCentreField
     /// <param name="remanentFluxDensity">Remanent flux density [T].</param>
     /// <returns>B_z [T].</returns>
     public double At(double height, double remanentFluxDensity) =>
-        _field.SteelAndRecoilFactor * _image.NormalFluxDensity(_field.Magnets.Geometry.PitchRadius, 0.0, height, remanentFluxDensity);
+        _field.SteelAndRecoilFactor * _image.NormalFluxDensity(_field.Magnets.Row.PitchRadius, 0.0, height, remanentFluxDensity);
 
     /// <summary>Lowest and highest normal flux density through the winding's thickness.</summary>
     /// <param name="remanentFluxDensity">Remanent flux density [T].</param>

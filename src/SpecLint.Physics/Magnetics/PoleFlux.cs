@@ -50,7 +50,7 @@ public sealed class PoleFlux
     public double MeanOverAnnulus(double height, double remanentFluxDensity)
     {
         WaveNumberGrid grid = _field.Magnets.Grid;
-        MagnetGeometry g = _field.Magnets.Geometry;
+        MagnetRow g = _field.Magnets.Row;
         (double sum, _) = _field.Sum.AllHarmonics(
             _field.SlabLayers, (in LayerResponse r) => r.Normal(height), Annulus, n => grid.IsLinear ? Alternation(n) / n : 1.0);
         double area = grid.IsLinear
@@ -69,7 +69,7 @@ public sealed class PoleFlux
     /// <remarks>The flux of a pole divides toward its two neighbours in the plate. Taken at the middle of the gap (open: of the winding).</remarks>
     public double PlateFluxDensity(double plateThickness, double remanentFluxDensity)
     {
-        MagnetGeometry g = _field.Magnets.Geometry;
+        MagnetRow g = _field.Magnets.Row;
         double width = g.IsLinear
             ? g.PolePitch
             : Math.PI * ((g.OuterRadius * g.OuterRadius) - (g.InnerRadius * g.InnerRadius)) / (2.0 * g.PolePairs * g.Length);
@@ -97,7 +97,7 @@ public sealed class PoleFlux
         {
             double kx = n * Math.PI / pitch;
             double amplitude = _field.SlabLayers.Response(kx).Normal(height);
-            double magnet = 2.0 * LinearTransform.Magnet(_field.Magnets.Geometry, kx, 0.0) / pitch;
+            double magnet = 2.0 * LinearTransform.Magnet(_field.Magnets.Row, kx, 0.0) / pitch;
             sum += Alternation(n) * 2.0 * amplitude * magnet / kx;
             if (amplitude < Tolerance)
             {
@@ -112,7 +112,7 @@ public sealed class PoleFlux
     {
         const int Nodes = WaveNumberGrid.NodesPerBlock;
         WaveNumberGrid grid = _field.Magnets.Grid;
-        MagnetGeometry g = _field.Magnets.Geometry;
+        MagnetRow g = _field.Magnets.Row;
         while (_annulus.Count <= block)
         {
             int next = _annulus.Count;

@@ -35,7 +35,7 @@ internal sealed class PolygonSheet : IChargeSheet
     /// <param name="magnets">Sector magnets.</param>
     /// <param name="chordDegrees">Largest angle of one chord [degree].</param>
     /// <returns>The sheet.</returns>
-    public static PolygonSheet Sector(in MagnetGeometry magnets, double chordDegrees)
+    public static PolygonSheet Sector(in MagnetRow magnets, double chordDegrees)
     {
         (double inner, double outer, double halfAngle) = (magnets.InnerRadius, magnets.OuterRadius, magnets.SectorHalfAngle);
         int segments = (int)Math.Ceiling(2.0 * halfAngle * 180.0 / (Math.PI * chordDegrees));

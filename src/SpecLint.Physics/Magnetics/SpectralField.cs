@@ -92,7 +92,7 @@ public sealed class SpectralField
     {
         get
         {
-            double k = Math.PI / Magnets.Geometry.PitchArc;
+            double k = Math.PI / Magnets.Row.PitchArc;
             return RecoilFactor * _slab.Response(k).Normal(Layer.MidHeight) / _ideal.Response(k).Normal(Layer.MidHeight);
         }
     }
@@ -157,7 +157,7 @@ public sealed class SpectralField
     {
         const int Blocks = 3;
         double cut = Blocks * Magnets.Grid.BlockWidth / CutShare;
-        MagnetGeometry g = Magnets.Geometry;
+        MagnetRow g = Magnets.Row;
         double measure = (Magnets.Grid.IsLinear ? 0.5 * Magnets.Grid.PolePitch : 0.5 * Math.PI / g.PolePairs) / g.FaceArea;
         double sum = measure * _sum.AllHarmonics(
             _ideal, (in LayerResponse r) => r.MeanOpposingField * Math.Exp(-Math.Pow(r.WaveNumber / cut, 4.0)), null, _ => 1.0).Sum;

@@ -203,6 +203,6 @@ internal sealed class SpectralSum
 
         double order = ((2.0 * harmonics) - 1.0) * _magnets.Grid.PolePairs;
         double k = (block + 1) * _magnets.Grid.BlockWidth;
-        return k * _magnets.Geometry.Reach > order || Math.Exp(-k * stack.MagnetThickness) < Tolerance;
+        return k * _magnets.Row.Reach > order || Math.Exp(-k * stack.MagnetThickness) < Tolerance;
     }
 }

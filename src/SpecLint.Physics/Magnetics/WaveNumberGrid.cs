@@ -1,4 +1,5 @@
 using System.Runtime.InteropServices;
+using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Numerics;
 
 namespace SpecLint.Physics.Magnetics;
@@ -54,11 +55,11 @@ public readonly record struct WaveNumberGrid
     /// <param name="magnets">The magnets.</param>
     /// <param name="coil">The coil.</param>
     /// <returns>The grid.</returns>
-    public static WaveNumberGrid For(in MagnetGeometry magnets, in CoilGeometry coil)
+    public static WaveNumberGrid For(in MagnetRow magnets, in CoilOutline coil)
     {
         bool linear = magnets.IsLinear;
         double reach = magnets.Reach;
-        double support = reach + Math.Max(reach, coil.ReachIn(linear)) + (linear ? magnets.PolePitch : 0.0);
+        double support = reach + Math.Max(reach, ReachOf(coil, linear)) + (linear ? magnets.PolePitch : 0.0);
         double rung = Math.Ceiling(Math.Log(support) / Math.Log(LadderStep));
         return new WaveNumberGrid
         {
@@ -89,4 +90,9 @@ public readonly record struct WaveNumberGrid
             }
         }
     }
+
+    // Sharp corners, as the coil's transform takes them.
+    private static double ReachOf(in CoilOutline coil, bool linear) => linear
+        ? coil.PitchRadius + (0.5 * coil.HoleLength) + coil.LegWidth
+        : CoilPlacement.OutermostRadius(coil with { CornerRadius = null });
 }

@@ -1,3 +1,4 @@
+using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Numerics;
 
 namespace SpecLint.Physics.Magnetics;
@@ -50,7 +51,7 @@ public sealed class WindingField
     /// <remarks>Legs of a keystone or rectangle: over the length of the hole, at the leg's centre line. Ring: at its mean radius.</remarks>
     public WindingFieldSquares Legs(double remanentFluxDensity)
     {
-        CoilGeometry coil = _field.Coil.Geometry;
+        CoilOutline coil = _field.Coil.Outline;
         if (coil.Shape == CoilShape.Round)
         {
             return Ring(coil, remanentFluxDensity);
@@ -59,10 +60,10 @@ public sealed class WindingField
         Span<double> places = stackalloc double[SectionNodes];
         Span<double> turns = stackalloc double[SectionNodes];
         bool linear = _field.Magnets.Grid.IsLinear;
+        double slope = Math.Tan(CoilGeometry.LegHalfAngle(coil));
         for (int i = 0; i < SectionNodes; i++)
         {
-            double x = coil.CentreRadius + (0.5 * coil.HoleLength * Along.Nodes[i]);
-            double slope = coil.Shape == CoilShape.Keystone ? Math.Tan(coil.LegHalfAngle) : 0.0;
+            double x = coil.PitchRadius + (0.5 * coil.HoleLength * Along.Nodes[i]);
             double aside = coil.Shape == CoilShape.Keystone ? x * slope : 0.5 * (coil.HoleWidth + coil.LegWidth);
             places[i] = linear ? x : double.Hypot(x, aside);
             turns[i] = linear ? 0.0 : Math.Atan(slope) - Math.Atan2(aside, x);
@@ -76,7 +77,7 @@ public sealed class WindingField
     /// <returns>Mean squares; of a ring, which has no bars, the same as of its legs.</returns>
     public WindingFieldSquares EndBars(double remanentFluxDensity)
     {
-        CoilGeometry coil = _field.Coil.Geometry;
+        CoilOutline coil = _field.Coil.Outline;
         if (coil.Shape == CoilShape.Round)
         {
             return Ring(coil, remanentFluxDensity);
@@ -84,21 +85,21 @@ public sealed class WindingField
 
         double reach = 0.5 * (coil.HoleLength + coil.LegWidth);
         double right = 0.5 * Math.PI;
-        ReadOnlySpan<double> places = [coil.CentreRadius - reach, coil.CentreRadius + reach];
+        ReadOnlySpan<double> places = [coil.PitchRadius - reach, coil.PitchRadius + reach];
         return Mean(places, [1.0, 1.0], [right, right], remanentFluxDensity);
     }
 
-    private WindingFieldSquares Ring(in CoilGeometry coil, double remanentFluxDensity)
+    private WindingFieldSquares Ring(in CoilOutline coil, double remanentFluxDensity)
     {
         Span<double> places = stackalloc double[SectionNodes];
         Span<double> turns = stackalloc double[SectionNodes];
         Span<double> weights = stackalloc double[SectionNodes];
-        double rho = coil.RingInnerRadius + (0.5 * coil.LegWidth);
+        double rho = 0.5 * (coil.HoleWidth + coil.LegWidth);
         for (int i = 0; i < SectionNodes; i++)
         {
             double angle = Math.PI * (i + 0.5) / SectionNodes;
             (double sine, double cosine) = Math.SinCos(angle);
-            double x = coil.CentreRadius + (rho * cosine);
+            double x = coil.PitchRadius + (rho * cosine);
             double y = rho * sine;
             bool linear = _field.Magnets.Grid.IsLinear;
             places[i] = linear ? x : double.Hypot(x, y);

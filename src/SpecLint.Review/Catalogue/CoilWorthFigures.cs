@@ -2,7 +2,6 @@ using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Magnetics;
 using SpecLint.Physics.Windings;
 using SpecLint.Review.Figures;
-using CoilOutline = SpecLint.Physics.Geometry.CoilOutline;
 
 namespace SpecLint.Review.Catalogue;
 
@@ -87,7 +86,7 @@ internal static class CoilWorthFigures
         double OwnFactor(double hole)
         {
             CoilOutline outline = WithHole(present, hole);
-            if (!Physics.Geometry.CoilGeometry.IsBuildable(outline))
+            if (!CoilGeometry.IsBuildable(outline))
             {
                 return 0;
             }
@@ -95,34 +94,34 @@ internal static class CoilWorthFigures
             double factor = linear
                 ? CoilSpanFactor.OfLinearCoil(outline, 1, pitch)
                 : CoilSpanFactor.OfDiscCoil(outline, 1, (int)pairs, outline.PitchRadius);
-            double reach = outline.Shape == Physics.Geometry.CoilShape.Round ? outline.HoleWidth + leg : 1;
-            return factor * factor * reach * reach / Physics.Geometry.CoilGeometry.MeanTurnLength(outline);
+            double reach = outline.Shape == CoilShape.Round ? outline.HoleWidth + leg : 1;
+            return factor * factor * reach * reach / CoilGeometry.MeanTurnLength(outline);
         }
 
         double place = GreatestOf(OwnFactor, narrowest, widest);
-        WaveNumberGrid grid = WaveNumberGrid.For(field.Magnets.Geometry, FieldParts.PlanOf(WithHole(present, widest)));
-        MagnetTransform magnets = grid.PanelWidth < field.Magnets.Grid.PanelWidth ? new MagnetTransform(field.Magnets.Geometry, grid) : field.Magnets;
+        WaveNumberGrid grid = WaveNumberGrid.For(field.Magnets.Row, WithHole(present, widest));
+        MagnetTransform magnets = grid.PanelWidth < field.Magnets.Grid.PanelWidth ? new MagnetTransform(field.Magnets.Row, grid) : field.Magnets;
         double Merit(double hole)
         {
             CoilOutline outline = WithHole(present, hole);
-            if (!Physics.Geometry.CoilGeometry.IsBuildable(outline))
+            if (!CoilGeometry.IsBuildable(outline))
             {
                 return 0;
             }
 
-            var transform = new CoilTransform(FieldParts.PlanOf(outline), magnets.Grid);
+            var transform = new CoilTransform(outline, magnets.Grid);
             double linkage = new SpectralField(magnets, transform, field.Stack, field.Layer).IdealFluxLinkage(1).Harmonic(1);
-            return linkage * linkage / Physics.Geometry.CoilGeometry.MeanTurnLength(outline);
+            return linkage * linkage / CoilGeometry.MeanTurnLength(outline);
         }
 
         double presentLinkage = field.IdealFluxLinkage(1).Harmonic(1);
-        double now = presentLinkage * presentLinkage / Physics.Geometry.CoilGeometry.MeanTurnLength(WithHole(present, present.HoleWidth));
+        double now = presentLinkage * presentLinkage / CoilGeometry.MeanTurnLength(WithHole(present, present.HoleWidth));
         (double best, double merit) = Climb(Merit, place, widest);
         (best, merit) = now > merit ? (present.HoleWidth, now) : (best, merit);
-        return new(new HoleSearch(Physics.Geometry.CoilGeometry.HoleExtent(WithHole(present, best)), now / merit));
+        return new(new HoleSearch(CoilGeometry.HoleExtent(WithHole(present, best)), now / merit));
     }
 
-    private static CoilOutline WithHole(in CoilOutline coil, double hole) => coil.Shape == Physics.Geometry.CoilShape.Round
+    private static CoilOutline WithHole(in CoilOutline coil, double hole) => coil.Shape == CoilShape.Round
         ? coil with { HoleWidth = hole, HoleLength = hole }
         : coil with { HoleWidth = hole, CornerRadius = null };
 

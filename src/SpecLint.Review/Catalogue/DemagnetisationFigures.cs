@@ -1,3 +1,4 @@
+using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Magnetics;
 using SpecLint.Review.Figures;
 
@@ -108,11 +109,11 @@ internal static class DemagnetisationFigures
         // A row stretched until the neighbours no longer matter, without steel, is one magnet in air.
         const double Apart = 40;
         MagneticLayers alone = layers.Outline with { Behind = SteelPlate.None, Opposite = OppositeSide.Open, OppositePlate = SteelPlate.None, Gap = 0 };
-        MagnetGeometry magnet = row.Outline;
+        MagnetRow magnet = row.Outline;
         double reach = Math.Max(magnet.Length, magnet.Width);
-        MagnetGeometry lone = magnet.Shape == MagnetShape.Disc
-            ? MagnetGeometry.LinearDisc(Apart * magnet.Length, magnet.Length)
-            : MagnetGeometry.LinearBlock(Apart * reach, magnet.Length, Math.Max(magnet.Width, x.Figure("magnet.extent")));
+        MagnetRow lone = magnet.Shape == MagnetShape.Disc
+            ? MagnetRow.LinearDisc(Apart * magnet.Length, magnet.Length)
+            : MagnetRow.LinearBlock(Apart * reach, magnet.Length, Math.Max(magnet.Width, x.Figure("magnet.extent")));
         return new(DemagnetisingField.Of(lone, alone));
     }
 }

@@ -1,3 +1,4 @@
+using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Magnetics;
 using SpecLint.Review.Figures;
 using SpecLint.Review.Rules;
@@ -54,7 +55,7 @@ internal static class FieldFigures
             return x.Stop();
         }
 
-        return magnet.Outline.Shape == Physics.Geometry.MagnetShape.Disc
+        return magnet.Outline.Shape == MagnetShape.Disc
             ? x.Value(FreeMagnet.CylinderOnAxis(Cylinder(magnet.Outline, thickness, remanence), distance))
             : x.Value(FreeMagnet.BlockOnAxis(Block(magnet.Outline, thickness, remanence), distance));
     }
@@ -68,7 +69,7 @@ internal static class FieldFigures
             return x.Stop();
         }
 
-        return magnet.Outline.Shape == Physics.Geometry.MagnetShape.Disc
+        return magnet.Outline.Shape == MagnetShape.Disc
             ? x.Value(FreeMagnet.CylinderReach(Cylinder(magnet.Outline, thickness, remanence), ImplantCaution))
             : x.Value(FreeMagnet.BlockReach(Block(magnet.Outline, thickness, remanence), ImplantCaution));
     }
@@ -82,18 +83,18 @@ internal static class FieldFigures
             return x.Stop();
         }
 
-        return magnet.Outline.Shape == Physics.Geometry.MagnetShape.Disc
+        return magnet.Outline.Shape == MagnetShape.Disc
             ? x.Value(FreeMagnet.CylinderPullOnSteel(Cylinder(magnet.Outline, thickness, remanence), 0))
             : x.Value(FreeMagnet.BlockPullOnSteel(Block(magnet.Outline, thickness, remanence), 0));
     }
 
-    private static FreeCylinder Cylinder(in Physics.Geometry.MagnetOutline magnet, double thickness, double remanence) =>
+    private static FreeCylinder Cylinder(in MagnetOutline magnet, double thickness, double remanence) =>
         new() { Diameter = magnet.Length, Thickness = thickness, RemanentFluxDensity = remanence };
 
-    private static FreeBlock Block(in Physics.Geometry.MagnetOutline magnet, double thickness, double remanence) => new()
+    private static FreeBlock Block(in MagnetOutline magnet, double thickness, double remanence) => new()
     {
         Length = magnet.Length,
-        Width = Physics.Geometry.MagnetPlacement.Extent(magnet),
+        Width = MagnetPlacement.Extent(magnet),
         Thickness = thickness,
         RemanentFluxDensity = remanence,
     };
@@ -124,7 +125,7 @@ internal static class FieldFigures
     {
         double remanence = x.Figure("magnet.remanence");
         return x.Part(Harmonics) is { } winding && x.Part(FieldParts.RotorField) is { } field && !x.Incomplete
-            ? x.Value(Math.Abs(winding.NormalFundamental(field.Magnets.Geometry.PitchRadius, field.Layer.MidHeight, remanence)))
+            ? x.Value(Math.Abs(winding.NormalFundamental(field.Magnets.Row.PitchRadius, field.Layer.MidHeight, remanence)))
             : x.Stop();
     }
 

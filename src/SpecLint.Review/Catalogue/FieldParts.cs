@@ -2,7 +2,6 @@ using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Magnetics;
 using SpecLint.Review.Figures;
 using SpecLint.Review.Rules;
-using CoilPlan = SpecLint.Physics.Magnetics.CoilGeometry;
 
 namespace SpecLint.Review.Catalogue;
 
@@ -10,10 +9,11 @@ namespace SpecLint.Review.Catalogue;
 internal static class FieldParts
 {
     /// <summary>Magnets round the rotor or along the track.</summary>
-    public static PartDefinition<Shape<MagnetGeometry>> Row { get; } = new("row of magnets", ReadRow);
+    public static PartDefinition<Shape<MagnetRow>> Row { get; } = new("row of magnets", ReadRow);
 
-    /// <summary>Plan of the coil for the field solution.</summary>
-    public static PartDefinition<Shape<CoilPlan>> Plan { get; } = new("plan of the coil", ReadPlan);
+    /// <summary>The coil as the field solution takes it: every turn mitred sharp.</summary>
+    public static PartDefinition<Shape<CoilOutline>> Plan { get; } = new("plan of the coil", x =>
+        x.Part(MachineParts.Coil) is { } coil ? new(coil.Outline with { CornerRadius = null }) : null);
 
     /// <summary>Transform of the magnets' outline, on a grid that follows from the magnets alone.</summary>
     public static PartDefinition<MagnetTransform> RotorTransform { get; } = new("transform of the magnet", x =>
@@ -24,18 +24,18 @@ internal static class FieldParts
     /// <summary>Transform of the magnets on the grid that the coil shares; the rotor's own unless the coil reaches farther.</summary>
     public static PartDefinition<MagnetTransform> MagnetTransform { get; } = new("transform of the magnet on the coil's grid", x =>
     {
-        if (x.Part(RotorTransform) is not { } rotor || x.Part(Plan) is not { } plan)
+        if (x.Part(RotorTransform) is not { } rotor || x.Part(Plan) is not { } coil)
         {
             return null;
         }
 
-        WaveNumberGrid needed = WaveNumberGrid.For(rotor.Geometry, plan.Outline);
-        return needed.PanelWidth < rotor.Grid.PanelWidth ? new MagnetTransform(rotor.Geometry, needed) : rotor;
+        WaveNumberGrid needed = WaveNumberGrid.For(rotor.Row, coil.Outline);
+        return needed.PanelWidth < rotor.Grid.PanelWidth ? new MagnetTransform(rotor.Row, needed) : rotor;
     });
 
     /// <summary>Transform of the coil's turn density.</summary>
     public static PartDefinition<CoilTransform> CoilTransform { get; } = new("transform of the coil", x =>
-        x.Part(MagnetTransform) is { } magnets && x.Part(Plan) is { } plan ? new CoilTransform(plan.Outline, magnets.Grid) : null);
+        x.Part(MagnetTransform) is { } magnets && x.Part(Plan) is { } coil ? new CoilTransform(coil.Outline, magnets.Grid) : null);
 
     /// <summary>
     /// The solved gap field for what the coil's plan does not touch: field, flux and force. Its coil is a nominal one of
@@ -43,7 +43,7 @@ internal static class FieldParts
     /// </summary>
     public static PartDefinition<SpectralField> RotorField { get; } = new("harmonic solution of the rotor's field", x =>
         x.Part(RotorTransform) is { } magnets
-            ? Solve(x, magnets, new CoilTransform(NominalCoil(magnets.Geometry), magnets.Grid))
+            ? Solve(x, magnets, new CoilTransform(NominalCoil(magnets.Row), magnets.Grid))
             : null);
 
     /// <summary>Layers across the gap.</summary>
@@ -52,7 +52,7 @@ internal static class FieldParts
     /// <summary>The solved gap field per tesla of remanence.</summary>
     public static PartDefinition<SpectralField> Field { get; } = new("harmonic solution of the gap field", ReadField);
 
-    private static Shape<MagnetGeometry>? ReadRow(Evaluation x)
+    private static Shape<MagnetRow>? ReadRow(Evaluation x)
     {
         bool linear = MachineParts.IsLinear(x);
         double pairs = x.Figure("machine.pole-pairs");
@@ -68,39 +68,10 @@ internal static class FieldParts
             return null;
         }
 
-        MagnetOutline magnet = part.Outline;
-        return new(magnet.Shape switch
-        {
-            Physics.Geometry.MagnetShape.Disc when linear => MagnetGeometry.LinearDisc(pitch, magnet.Length),
-            Physics.Geometry.MagnetShape.Disc => MagnetGeometry.AxialDisc((int)pairs, magnet.PitchRadius, magnet.Length),
-            Physics.Geometry.MagnetShape.Sector => MagnetGeometry.AxialSector(
-                (int)pairs,
-                magnet.PitchRadius - (0.5 * magnet.Length),
-                magnet.PitchRadius + (0.5 * magnet.Length),
-                magnet.SectorAngle * pairs / Math.PI),
-            _ when linear => MagnetGeometry.LinearBlock(pitch, magnet.Length, magnet.Width),
-            _ => MagnetGeometry.AxialBlock((int)pairs, magnet.PitchRadius, magnet.Length, magnet.Width),
-        });
+        // A sector lies about an axis.
+        bool straight = linear && part.Outline.Shape != MagnetShape.Sector;
+        return new(new MagnetRow { Outline = part.Outline, PolePairs = straight ? 0 : (int)pairs, PolePitch = straight ? pitch : 0 });
     }
-
-    private static Shape<CoilPlan>? ReadPlan(Evaluation x)
-    {
-        if (x.Part(MachineParts.Coil) is not { } part)
-        {
-            return null;
-        }
-
-        return new(PlanOf(part.Outline));
-    }
-
-    /// <summary>The coil as the field solution takes it: turns mitred sharp.</summary>
-    /// <param name="coil">The coil.</param>
-    public static CoilPlan PlanOf(in Physics.Geometry.CoilOutline coil) => coil.Shape switch
-    {
-        Physics.Geometry.CoilShape.Keystone => CoilPlan.Keystone(coil.PitchRadius, coil.HoleLength, coil.HoleWidth, coil.LegWidth),
-        Physics.Geometry.CoilShape.Rectangle => CoilPlan.Rectangle(coil.PitchRadius, coil.HoleLength, coil.HoleWidth, coil.LegWidth),
-        _ => CoilPlan.Round(coil.PitchRadius, 0.5 * coil.HoleWidth, (0.5 * coil.HoleWidth) + coil.LegWidth),
-    };
 
     private static Shape<MagneticLayers>? ReadLayers(Evaluation x)
     {
@@ -179,9 +150,17 @@ internal static class FieldParts
     }
 
     /// <summary>A rectangular coil as long as the magnet, its legs a pole pitch apart to a large part.</summary>
-    private static CoilPlan NominalCoil(in MagnetGeometry magnets)
+    private static CoilOutline NominalCoil(in MagnetRow magnets)
     {
-        double pitch = magnets.IsLinear ? magnets.PolePitch : Math.PI * magnets.PitchRadius / magnets.PolePairs;
-        return CoilPlan.Rectangle(magnets.PitchRadius, magnets.Length, 0.5 * pitch, 0.3 * pitch);
+        double pitch = magnets.PitchArc;
+        return new CoilOutline
+        {
+            Shape = CoilShape.Rectangle,
+            PitchRadius = magnets.PitchRadius,
+            HoleLength = magnets.Length,
+            HoleWidth = 0.5 * pitch,
+            LegWidth = 0.3 * pitch,
+            Thickness = 0.3 * pitch,
+        };
     }
 }

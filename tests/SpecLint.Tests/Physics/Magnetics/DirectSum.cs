@@ -1,3 +1,4 @@
+using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Magnetics;
 
 namespace SpecLint.Tests.Physics.Magnetics;
@@ -8,7 +9,7 @@ namespace SpecLint.Tests.Physics.Magnetics;
 /// </summary>
 internal static class DirectSum
 {
-    public static double NormalField(in MagnetGeometry g, in MagneticLayers layers, double x, double y, double height)
+    public static double NormalField(in MagnetRow g, in MagneticLayers layers, double x, double y, double height)
     {
         double h = layers.MagnetThickness;
         double z = height + h;
@@ -29,7 +30,7 @@ internal static class DirectSum
     }
 
     /// <summary>Fundamental linkage per turn and unit remanence: cosine mean over twelve coil angles of half an electrical period.</summary>
-    public static double Fundamental(in MagnetGeometry g, in MagneticLayers layers, in CoilGeometry coil, in CoilLayer layer)
+    public static double Fundamental(in MagnetRow g, in MagneticLayers layers, in CoilOutline coil, in CoilLayer layer)
     {
         const int Angles = 12;
         double sum = 0.0;
@@ -42,35 +43,35 @@ internal static class DirectSum
         return sum;
     }
 
-    public static double TurnShare(in CoilGeometry coil, double x, double y)
+    public static double TurnShare(in CoilOutline coil, double x, double y)
     {
         if (coil.Shape == CoilShape.Round)
         {
-            double d = double.Hypot(x - coil.CentreRadius, y);
-            return Math.Clamp((coil.RingOuterRadius - d) / coil.LegWidth, 0.0, 1.0);
+            double d = double.Hypot(x - coil.PitchRadius, y);
+            return Math.Clamp((((0.5 * coil.HoleWidth) + coil.LegWidth) - d) / coil.LegWidth, 0.0, 1.0);
         }
 
-        double ends = Math.Abs(x - coil.CentreRadius) - (0.5 * coil.HoleLength);
-        double angle = coil.Shape == CoilShape.Keystone ? coil.LegHalfAngle : 0.0;
+        double ends = Math.Abs(x - coil.PitchRadius) - (0.5 * coil.HoleLength);
+        double angle = CoilGeometry.LegHalfAngle(coil);
 
         // Distance of the point from the hole's inner leg edge, across the leg.
-        double legs = ((Math.Abs(y) - (0.5 * coil.HoleWidth)) * Math.Cos(angle)) - ((x - coil.CentreRadius) * Math.Sin(angle));
+        double legs = ((Math.Abs(y) - (0.5 * coil.HoleWidth)) * Math.Cos(angle)) - ((x - coil.PitchRadius) * Math.Sin(angle));
         return Math.Clamp(1.0 - (Math.Max(ends, legs) / coil.LegWidth), 0.0, 1.0);
     }
 
-    private static double Linkage(in MagnetGeometry g, in MagneticLayers layers, in CoilGeometry coil, in CoilLayer layer, double theta)
+    private static double Linkage(in MagnetRow g, in MagneticLayers layers, in CoilOutline coil, in CoilLayer layer, double theta)
     {
         const int Steps = 44;
         double[] heights = [-0.7745966692414834, 0.0, 0.7745966692414834];
         double[] weights = [5.0 / 18.0, 8.0 / 18.0, 5.0 / 18.0];
-        double half = coil.Shape == CoilShape.Round ? coil.RingOuterRadius : (0.5 * Math.Max(coil.HoleLength, coil.HoleWidth)) + (1.4 * coil.LegWidth);
+        double half = coil.Shape == CoilShape.Round ? ((0.5 * coil.HoleWidth) + coil.LegWidth) : (0.5 * Math.Max(coil.HoleLength, coil.HoleWidth)) + (1.4 * coil.LegWidth);
         (double sine, double cosine) = Math.SinCos(theta);
         double sum = 0.0;
         for (int i = 0; i < Steps; i++)
         {
             for (int j = 0; j < Steps; j++)
             {
-                double x = coil.CentreRadius + (half * ((2.0 * (i + 0.5) / Steps) - 1.0));
+                double x = coil.PitchRadius + (half * ((2.0 * (i + 0.5) / Steps) - 1.0));
                 double y = half * ((2.0 * (j + 0.5) / Steps) - 1.0);
                 double share = TurnShare(coil, x, y);
                 for (int q = 0; share > 0.0 && q < 3; q++)
@@ -84,7 +85,7 @@ internal static class DirectSum
         return sum * 4.0 * half * half / (Steps * Steps);
     }
 
-    private static double Row(in MagnetGeometry g, double x, double y, double z)
+    private static double Row(in MagnetRow g, double x, double y, double z)
     {
         double sum = 0.0;
         for (int j = 0; j < 2 * g.PolePairs; j++)

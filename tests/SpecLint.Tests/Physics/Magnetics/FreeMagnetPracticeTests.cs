@@ -1,3 +1,4 @@
+using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Magnetics;
 
 namespace SpecLint.Tests.Physics.Magnetics;
@@ -30,7 +31,7 @@ public sealed class FreeMagnetPracticeTests
     [Fact]
     public void Sweep_SpacerDoubled_LowersPeakEmfAsInPractice()
     {
-        CoilGeometry coil = SquareCoil(0.048);
+        CoilOutline coil = SquareCoil(0.048);
 
         double ratio = Peak(Neodymium, coil, 2.0 * Spacer) / Peak(Neodymium, coil, Spacer);
 
@@ -41,7 +42,7 @@ public sealed class FreeMagnetPracticeTests
     [Fact]
     public void Sweep_CeramicForNeodymium_LowersPeakEmfAsInPractice()
     {
-        CoilGeometry coil = SquareCoil(0.048);
+        CoilOutline coil = SquareCoil(0.048);
         double weakest = Peak(Ceramic with { RemanentFluxDensity = 0.375 }, coil, Spacer) / Peak(Neodymium with { RemanentFluxDensity = 1.48 }, coil, Spacer);
         double strongest = Peak(Ceramic with { RemanentFluxDensity = 0.395 }, coil, Spacer) / Peak(Neodymium with { RemanentFluxDensity = 1.42 }, coil, Spacer);
 
@@ -52,7 +53,7 @@ public sealed class FreeMagnetPracticeTests
     [Fact]
     public void Sweep_CoilSeveralTimesWider_GivesTwoPulsesWithDeadTime()
     {
-        CoilGeometry coil = CoilGeometry.Rectangle(0.0, 4.0 * Side, 4.0 * Side, 0.010);
+        CoilOutline coil = Coils.Rectangle(0.0, 4.0 * Side, 4.0 * Side, 0.010);
         double peak = Peak(Neodymium, coil, Spacer);
 
         double entering = Emf(Neodymium, coil, Spacer, -2.0 * Side);
@@ -67,7 +68,7 @@ public sealed class FreeMagnetPracticeTests
     [Fact]
     public void Sweep_TravelTurned_TurnsWaveformRound()
     {
-        CoilGeometry coil = SquareCoil(0.048);
+        CoilOutline coil = SquareCoil(0.048);
         for (double at = -0.1; at <= 0.1; at += 0.01)
         {
             Assert.Equal(Emf(Neodymium, coil, Spacer, at), -Emf(Neodymium, coil, Spacer, -at), 1e-6);
@@ -78,7 +79,7 @@ public sealed class FreeMagnetPracticeTests
     public void BlockFluxThroughCoil_AgreesWithQuadratureOfField()
     {
         FreeBlock block = new() { Length = 0.03, Width = 0.02, Thickness = 0.012, RemanentFluxDensity = 1.1 };
-        CoilGeometry coil = CoilGeometry.Rectangle(0.0, 0.02, 0.016, 0.008);
+        CoilOutline coil = Coils.Rectangle(0.0, 0.02, 0.016, 0.008);
         CoilLayer layer = new() { MidHeight = 0.006, Thickness = 0.0 };
         double flux = 0.0;
         const int Steps = 300;
@@ -97,9 +98,9 @@ public sealed class FreeMagnetPracticeTests
         Assert.Equal(1.0, FreeMagnet.BlockFluxThroughCoil(block, coil, layer, 0.007) / flux, 2e-4);
     }
 
-    private static CoilGeometry SquareCoil(double meanWidth) => CoilGeometry.Rectangle(0.0, meanWidth - 0.008, meanWidth - 0.008, 0.008);
+    private static CoilOutline SquareCoil(double meanWidth) => Coils.Rectangle(0.0, meanWidth - 0.008, meanWidth - 0.008, 0.008);
 
-    private static double Emf(in FreeBlock block, in CoilGeometry coil, double spacer, double displacement)
+    private static double Emf(in FreeBlock block, in CoilOutline coil, double spacer, double displacement)
     {
         const double Step = 1e-4;
         CoilLayer layer = new() { MidHeight = spacer + 0.0015, Thickness = 0.003 };
@@ -108,7 +109,7 @@ public sealed class FreeMagnetPracticeTests
         return (behind - ahead) / (2.0 * Step);
     }
 
-    private static double Peak(in FreeBlock block, in CoilGeometry coil, double spacer)
+    private static double Peak(in FreeBlock block, in CoilOutline coil, double spacer)
     {
         double peak = 0.0;
         for (double at = 0.0; at < 0.5 * (coil.HoleWidth + (2.0 * coil.LegWidth)) + block.Width; at += 0.0005)

@@ -1,3 +1,4 @@
+using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Magnetics;
 
 namespace SpecLint.Tests.Physics.Magnetics;
@@ -55,8 +56,8 @@ public sealed class InstalledMagnetTests
         const int Heights = 32;
         for (int i = 0; i < Lengths; i++)
         {
-            double x = c.Coil.CentreRadius + (c.Coil.HoleLength * (((i + 0.5) / Lengths) - 0.5));
-            double aside = c.Coil.Shape == CoilShape.Keystone ? x * Math.Tan(c.Coil.LegHalfAngle) : 0.5 * (c.Coil.HoleWidth + c.Coil.LegWidth);
+            double x = c.Coil.PitchRadius + (c.Coil.HoleLength * (((i + 0.5) / Lengths) - 0.5));
+            double aside = c.Coil.Shape == CoilShape.Keystone ? x * Math.Tan(CoilGeometry.LegHalfAngle(c.Coil)) : 0.5 * (c.Coil.HoleWidth + c.Coil.LegWidth);
             double place = c.IsLinear ? x : double.Hypot(x, aside);
             for (int j = 0; j < Heights; j++)
             {
@@ -135,8 +136,8 @@ public sealed class InstalledMagnetTests
     [Fact]
     public void ThroughWinding_ThreeTenthsOfMillimetreClearance_IsDirectImageSum()
     {
-        MagnetGeometry magnets = MagnetGeometry.AxialBlock(6, 0.12, 0.046, 0.03);
-        CoilGeometry coil = CoilGeometry.Round(0.12, 0.012, 0.032);
+        MagnetRow magnets = MagnetRow.AxialBlock(6, 0.12, 0.046, 0.03);
+        CoilOutline coil = Coils.Round(0.12, 0.012, 0.032);
         WaveNumberGrid grid = WaveNumberGrid.For(magnets, coil);
         MagneticLayers layers = new()
         {
@@ -157,7 +158,7 @@ public sealed class InstalledMagnetTests
         Assert.InRange(field.IdealFluxLinkage(1.0).NumericalError / field.IdealFluxLinkage(1.0).Fundamental, 0.0, 1e-5);
     }
 
-    private static IEnumerable<(double X, double Y)> Face(MagnetGeometry g, int steps)
+    private static IEnumerable<(double X, double Y)> Face(MagnetRow g, int steps)
     {
         for (int i = 0; i < steps; i++)
         {
@@ -174,7 +175,7 @@ public sealed class InstalledMagnetTests
     }
 
     /// <summary>Fourier analysis of the image field along a quarter of the electrical period.</summary>
-    private static (double Normal, double Along, double Across) Squares(ImageField image, MagnetGeometry g, double place, double z)
+    private static (double Normal, double Along, double Across) Squares(ImageField image, MagnetRow g, double place, double z)
     {
         const int Steps = 40;
         const int Harmonics = 16;

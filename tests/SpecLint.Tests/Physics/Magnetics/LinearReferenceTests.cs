@@ -1,4 +1,5 @@
 using System.Text.Json;
+using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Magnetics;
 
 namespace SpecLint.Tests.Physics.Magnetics;
@@ -101,8 +102,8 @@ public sealed class LinearReferenceTests
     public void NormalFundamental_VeryLongMagnets_IsTwoDimensionalSolution(double gap, double fromMiddle, double expected)
     {
         // Bumby J.R., Martin R., IEE Proc. EPA 152(5), 2005: facing rotors, h 10 mm, tau 65.45 mm, width 30 mm, Br 1.25 T (printed to four digits).
-        MagnetGeometry magnets = MagnetGeometry.LinearBlock(0.1250 * Math.PI / 6.0, 1.0, 0.030);
-        CoilGeometry coil = CoilGeometry.Rectangle(0.0, 0.03, 0.03, 0.015);
+        MagnetRow magnets = MagnetRow.LinearBlock(0.1250 * Math.PI / 6.0, 1.0, 0.030);
+        CoilOutline coil = Coils.Rectangle(0.0, 0.03, 0.03, 0.015);
         WaveNumberGrid grid = WaveNumberGrid.For(magnets, coil);
         MagneticLayers layers = new()
         {
@@ -133,8 +134,8 @@ public sealed class LinearReferenceTests
 
     private static double LonelyBlock(double length, double width, double thickness)
     {
-        MagnetGeometry magnets = MagnetGeometry.LinearBlock(0.3, length, width);
-        CoilGeometry coil = CoilGeometry.Round(0.0, 0.002, 0.005);
+        MagnetRow magnets = MagnetRow.LinearBlock(0.3, length, width);
+        CoilOutline coil = Coils.Round(0.0, 0.002, 0.005);
         WaveNumberGrid grid = WaveNumberGrid.For(magnets, coil);
         MagneticLayers layers = new()
         {

@@ -1,4 +1,5 @@
 using System.Text.Json;
+using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Magnetics;
 
 namespace SpecLint.Tests.Physics.Magnetics;
@@ -29,29 +30,29 @@ public sealed class ReferenceCase
 
     public double Remanence => Inputs.GetProperty("magnet_remanence_T").GetDouble();
 
-    public MagnetGeometry Magnets => IsLinear
-        ? MagnetGeometry.LinearBlock(Number("pole_pitch_m"), Number("magnet_depth_m"), Number("magnet_length_along_motion_m"))
+    public MagnetRow Magnets => IsLinear
+        ? MagnetRow.LinearBlock(Number("pole_pitch_m"), Number("magnet_depth_m"), Number("magnet_length_along_motion_m"))
         : Inputs.GetProperty("magnet_shape").GetString() switch
         {
-            "rectangular_block" => MagnetGeometry.AxialBlock(
+            "rectangular_block" => MagnetRow.AxialBlock(
                 PolePairs, Number("magnet_pitch_radius_m"), Number("magnet_radial_length_m"), Number("magnet_tangential_width_m")),
-            "round_disc" => MagnetGeometry.AxialDisc(PolePairs, Number("magnet_pitch_radius_m"), Number("magnet_diameter_m")),
-            _ => MagnetGeometry.AxialSector(
+            "round_disc" => MagnetRow.AxialDisc(PolePairs, Number("magnet_pitch_radius_m"), Number("magnet_diameter_m")),
+            _ => MagnetRow.AxialSector(
                 PolePairs, Number("magnet_inner_radius_m"), Number("magnet_outer_radius_m"), Number("magnet_arc_fraction_of_pole_pitch")),
         };
 
-    public CoilGeometry Coil => Inputs.GetProperty("coil_shape").GetString() switch
+    public CoilOutline Coil => Inputs.GetProperty("coil_shape").GetString() switch
     {
-        "round_ring" => CoilGeometry.Round(
+        "round_ring" => Coils.Round(
             IsLinear ? 0.0 : Number("coil_centre_radius_m"), Number("coil_inner_radius_m"), Number("coil_outer_radius_m")),
-        "keystone_radial_legs" => CoilGeometry.KeystoneByAngle(
+        "keystone_radial_legs" => Coils.KeystoneByAngle(
             Number("coil_hole_inner_distance_from_axis_m"),
             Number("coil_hole_outer_distance_from_axis_m"),
             Number("coil_leg_width_m"),
             Number("coil_leg_centreline_half_angle_mech_deg") * Math.PI / 180.0),
         _ => IsLinear
-            ? CoilGeometry.Rectangle(0.0, Number("coil_hole_depth_m"), Number("coil_hole_along_motion_m"), Number("coil_leg_width_m"))
-            : CoilGeometry.Rectangle(
+            ? Coils.Rectangle(0.0, Number("coil_hole_depth_m"), Number("coil_hole_along_motion_m"), Number("coil_leg_width_m"))
+            : Coils.Rectangle(
                 Number("coil_centre_radius_m"),
                 Number("coil_hole_radial_length_m"),
                 Number("coil_hole_tangential_width_m"),

@@ -1,5 +1,7 @@
 using CsCheck;
+using SpecLint.Physics.Geometry;
 using SpecLint.Physics.Magnetics;
+using SpecLint.Tests.Physics.Electrical;
 
 namespace SpecLint.Tests.Physics.Magnetics;
 
@@ -29,12 +31,12 @@ public sealed class SpectralFieldTests
     [MemberData(nameof(Combinations))]
     public void FluxLinkage_AgreesWithDirectImageSum(OppositeSide opposite, CoilShape shape)
     {
-        MagnetGeometry magnets = MagnetGeometry.AxialBlock(3, 0.06, 0.03, 0.028);
-        CoilGeometry coil = shape switch
+        MagnetRow magnets = MagnetRow.AxialBlock(3, 0.06, 0.03, 0.028);
+        CoilOutline coil = shape switch
         {
-            CoilShape.Round => CoilGeometry.Round(0.062, 0.008, 0.022),
-            CoilShape.Keystone => CoilGeometry.Keystone(0.061, 0.028, 0.02, 0.012),
-            _ => CoilGeometry.Rectangle(0.059, 0.028, 0.02, 0.012),
+            CoilShape.Round => Coils.Round(0.062, 0.008, 0.022),
+            CoilShape.Keystone => Coils.Keystone(0.061, 0.028, 0.02, 0.012),
+            _ => Coils.Rectangle(0.059, 0.028, 0.02, 0.012),
         };
         MagneticLayers layers = Layers(opposite, 0.012);
         CoilLayer layer = new() { MidHeight = 0.006, Thickness = 0.008 };
@@ -50,7 +52,7 @@ public sealed class SpectralFieldTests
     [InlineData(OppositeSide.Open)]
     public void ImageField_AgreesWithDirectImageSum(OppositeSide opposite)
     {
-        MagnetGeometry magnets = MagnetGeometry.AxialBlock(4, 0.08, 0.035, 0.03);
+        MagnetRow magnets = MagnetRow.AxialBlock(4, 0.08, 0.035, 0.03);
         MagneticLayers layers = Layers(opposite, 0.011);
         ImageField image = new(magnets, layers);
 
@@ -133,8 +135,8 @@ public sealed class SpectralFieldTests
     [Fact]
     public void Plate_MovedFarAway_IsOpenStack()
     {
-        MagnetGeometry magnets = MagnetGeometry.AxialBlock(6, 0.11, 0.04, 0.025);
-        CoilGeometry coil = CoilGeometry.Round(0.11, 0.01, 0.027);
+        MagnetRow magnets = MagnetRow.AxialBlock(6, 0.11, 0.04, 0.025);
+        CoilOutline coil = Coils.Round(0.11, 0.01, 0.027);
         CoilLayer layer = new() { MidHeight = 0.006, Thickness = 0.009 };
         SpectralField open = Field(magnets, coil, Layers(OppositeSide.Open, 0.0), layer);
         SpectralField plate = Field(magnets, coil, Layers(OppositeSide.Plate, 0.3), layer);
@@ -147,8 +149,8 @@ public sealed class SpectralFieldTests
     public void FacingMagnets_EqualHalfGapPlate_InEveryHarmonic()
     {
         // The plane midway between facing magnets is an equipotential.
-        MagnetGeometry magnets = MagnetGeometry.AxialDisc(4, 0.0925, 0.045);
-        CoilGeometry coil = CoilGeometry.Round(0.0925, 0.014, 0.033);
+        MagnetRow magnets = MagnetRow.AxialDisc(4, 0.0925, 0.045);
+        CoilOutline coil = Coils.Round(0.0925, 0.014, 0.033);
         CoilLayer layer = new() { MidHeight = 0.004, Thickness = 0.005 };
         double[] twin = [.. Field(magnets, coil, Layers(OppositeSide.Magnets, 0.016), layer).IdealFluxLinkage(1.0).Amplitudes];
         double[] plate = [.. Field(magnets, coil, Layers(OppositeSide.Plate, 0.008), layer).IdealFluxLinkage(1.0).Amplitudes];
@@ -174,14 +176,14 @@ public sealed class SpectralFieldTests
     [Fact]
     public void Constructor_ForeignGrid_Throws()
     {
-        MagnetGeometry magnets = MagnetGeometry.AxialDisc(4, 0.0925, 0.045);
-        CoilGeometry coil = CoilGeometry.Round(0.0925, 0.014, 0.033);
-        CoilGeometry wide = CoilGeometry.Round(0.0925, 0.014, 0.06);
+        MagnetRow magnets = MagnetRow.AxialDisc(4, 0.0925, 0.045);
+        CoilOutline coil = Coils.Round(0.0925, 0.014, 0.033);
+        CoilOutline wide = Coils.Round(0.0925, 0.014, 0.06);
         MagnetTransform m = new(magnets, WaveNumberGrid.For(magnets, coil));
         CoilTransform c = new(wide, WaveNumberGrid.For(magnets, wide));
 
         Assert.Throws<ArgumentException>(() => new SpectralField(m, c, Layers(OppositeSide.Magnets, 0.015), new CoilLayer { MidHeight = 0.0075, Thickness = 0.01 }));
-        Assert.Throws<ArgumentException>(() => new MagnetTransform(magnets with { Length = -1.0 }, m.Grid));
+        Assert.Throws<ArgumentException>(() => new MagnetTransform(magnets with { Outline = magnets.Outline with { Length = -1.0 } }, m.Grid));
     }
 
     private static bool Near(double expected, double actual, double tolerance) => Math.Abs(expected - actual) <= tolerance;
@@ -196,16 +198,16 @@ public sealed class SpectralFieldTests
         OppositePlate = opposite == OppositeSide.Plate ? SteelPlate.Ideal : SteelPlate.None,
     };
 
-    private static SpectralField Field(in MagnetGeometry magnets, in CoilGeometry coil, in MagneticLayers layers, in CoilLayer layer)
+    private static SpectralField Field(in MagnetRow magnets, in CoilOutline coil, in MagneticLayers layers, in CoilLayer layer)
     {
         WaveNumberGrid grid = WaveNumberGrid.For(magnets, coil);
         return new SpectralField(new MagnetTransform(magnets, grid), new CoilTransform(coil, grid), layers, layer);
     }
 
     /// <summary>A random machine.</summary>
-    private sealed record Machine(MagnetGeometry Magnets, CoilGeometry Coil, MagneticLayers Layers, CoilLayer Layer)
+    private sealed record Machine(MagnetRow Magnets, CoilOutline Coil, MagneticLayers Layers, CoilLayer Layer)
     {
-        public double Scale => FieldOn(WaveNumberGrid.For(Magnets, Coil)).Magnets.Geometry.FaceArea;
+        public double Scale => FieldOn(WaveNumberGrid.For(Magnets, Coil)).Magnets.Row.FaceArea;
 
         public static Machine Draw(
             int polePairs, double radius, (MagnetShape Magnet, CoilShape Coil) shapes, (OppositeSide Opposite, bool Steel) sides, double[] u)
@@ -213,18 +215,18 @@ public sealed class SpectralFieldTests
             double pitch = Math.PI * radius / polePairs;
             double length = Math.Min(pitch * (0.6 + u[0]), radius);
             double width = pitch * (0.45 + (0.4 * u[1]));
-            MagnetGeometry magnets = shapes.Magnet switch
+            MagnetRow magnets = shapes.Magnet switch
             {
-                MagnetShape.Block => MagnetGeometry.AxialBlock(polePairs, radius, length, width),
-                MagnetShape.Disc => MagnetGeometry.AxialDisc(polePairs, radius, width),
-                _ => MagnetGeometry.AxialSector(polePairs, radius - (0.5 * length), radius + (0.5 * length), 0.5 + (0.4 * u[1])),
+                MagnetShape.Block => MagnetRow.AxialBlock(polePairs, radius, length, width),
+                MagnetShape.Disc => MagnetRow.AxialDisc(polePairs, radius, width),
+                _ => MagnetRow.AxialSector(polePairs, radius - (0.5 * length), radius + (0.5 * length), 0.5 + (0.4 * u[1])),
             };
             double leg = pitch * (0.2 + (0.2 * u[2]));
-            CoilGeometry coil = shapes.Coil switch
+            CoilOutline coil = shapes.Coil switch
             {
-                CoilShape.Round => CoilGeometry.Round(radius, 0.3 * pitch, (0.3 * pitch) + leg),
-                CoilShape.Keystone => CoilGeometry.Keystone(radius, 0.8 * length, 0.95 * pitch, leg),
-                _ => CoilGeometry.Rectangle(radius, length, 0.6 * pitch, leg),
+                CoilShape.Round => Coils.Round(radius, 0.3 * pitch, (0.3 * pitch) + leg),
+                CoilShape.Keystone => Coils.Keystone(radius, 0.8 * length, 0.95 * pitch, leg),
+                _ => Coils.Rectangle(radius, length, 0.6 * pitch, leg),
             };
             double gap = pitch * (0.2 + (0.3 * u[3]));
             CoilLayer layer = new() { MidHeight = 0.5 * gap, Thickness = gap * (0.6 + (0.25 * u[4])) };
@@ -244,15 +246,11 @@ public sealed class SpectralFieldTests
             new(new MagnetTransform(Magnets, grid), new CoilTransform(Coil, grid), Layers, Layer);
 
         public Machine Scaled(double s) => new(
-            Magnets with { PitchRadius = Magnets.PitchRadius * s, Length = Magnets.Length * s, Width = Magnets.Width * s },
-            Coil with
+            Magnets with
             {
-                CentreRadius = Coil.CentreRadius * s,
-                HoleLength = Coil.HoleLength * s,
-                HoleWidth = Coil.HoleWidth * s,
-                LegWidth = Coil.LegWidth * s,
-                RingInnerRadius = Coil.RingInnerRadius * s,
+                Outline = Magnets.Outline with { PitchRadius = Magnets.PitchRadius * s, Length = Magnets.Length * s, Width = Magnets.Width * s },
             },
+            CoilSelfInductanceTests.Scaled(Coil, s),
             Layers with { MagnetThickness = Layers.MagnetThickness * s, Gap = Layers.Gap * s },
             new CoilLayer { MidHeight = Layer.MidHeight * s, Thickness = Layer.Thickness * s });
     }

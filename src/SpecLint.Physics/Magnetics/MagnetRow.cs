@@ -1,13 +1,14 @@
 using System.Runtime.InteropServices;
+using SpecLint.Physics.Geometry;
 
 namespace SpecLint.Physics.Magnetics;
 
 /// <summary>Outline and arrangement of the magnets of one rotor disc or of one linear row, poles alternating.</summary>
 [StructLayout(LayoutKind.Auto)]
-public readonly record struct MagnetGeometry
+public readonly record struct MagnetRow
 {
-    /// <summary>Outline of one magnet.</summary>
-    public required MagnetShape Shape { get; init; }
+    /// <summary>Outline and place of one magnet.</summary>
+    public required MagnetOutline Outline { get; init; }
 
     /// <summary>Pole pairs round the disc [-]; zero for a linear row.</summary>
     public int PolePairs { get; init; }
@@ -15,27 +16,16 @@ public readonly record struct MagnetGeometry
     /// <summary>Distance between neighbouring magnets of a linear row [m]; unused on a disc.</summary>
     public double PolePitch { get; init; }
 
-    /// <summary>Radius of the magnet's centre from the machine axis [m]; zero for a linear row.</summary>
-    public double PitchRadius { get; init; }
-
-    /// <summary>Radial length, or length across the travel [m]; a disc's diameter.</summary>
-    public required double Length { get; init; }
-
-    /// <summary>Width along the motion [m]; a disc's diameter; unused for a sector.</summary>
-    public double Width { get; init; }
-
-    /// <summary>Sector only: its angle as a fraction of the pole pitch [-], 0 to 1.</summary>
-    public double ArcFraction { get; init; }
-
     /// <summary>Blocks round a disc, two sides parallel to the radius through the centre.</summary>
     /// <param name="polePairs">Pole pairs [-], >= 1.</param>
     /// <param name="pitchRadius">Radius of the magnet centres [m].</param>
     /// <param name="length">Radial length [m].</param>
     /// <param name="width">Width along the motion [m].</param>
     /// <returns>The arrangement.</returns>
-    public static MagnetGeometry AxialBlock(int polePairs, double pitchRadius, double length, double width) => new()
+    public static MagnetRow AxialBlock(int polePairs, double pitchRadius, double length, double width) => new()
     {
-        Shape = MagnetShape.Block, PolePairs = polePairs, PitchRadius = pitchRadius, Length = length, Width = width,
+        PolePairs = polePairs,
+        Outline = new() { Shape = MagnetShape.Block, PitchRadius = pitchRadius, Length = length, Width = width },
     };
 
     /// <summary>Round magnets round a disc.</summary>
@@ -43,9 +33,10 @@ public readonly record struct MagnetGeometry
     /// <param name="pitchRadius">Radius of the magnet centres [m].</param>
     /// <param name="diameter">Magnet diameter [m].</param>
     /// <returns>The arrangement.</returns>
-    public static MagnetGeometry AxialDisc(int polePairs, double pitchRadius, double diameter) => new()
+    public static MagnetRow AxialDisc(int polePairs, double pitchRadius, double diameter) => new()
     {
-        Shape = MagnetShape.Disc, PolePairs = polePairs, PitchRadius = pitchRadius, Length = diameter, Width = diameter,
+        PolePairs = polePairs,
+        Outline = new() { Shape = MagnetShape.Disc, PitchRadius = pitchRadius, Length = diameter, Width = diameter },
     };
 
     /// <summary>Annular sectors round a disc.</summary>
@@ -54,13 +45,16 @@ public readonly record struct MagnetGeometry
     /// <param name="outerRadius">Outer radius [m].</param>
     /// <param name="arcFraction">Magnet angle over pole pitch [-].</param>
     /// <returns>The arrangement.</returns>
-    public static MagnetGeometry AxialSector(int polePairs, double innerRadius, double outerRadius, double arcFraction) => new()
+    public static MagnetRow AxialSector(int polePairs, double innerRadius, double outerRadius, double arcFraction) => new()
     {
-        Shape = MagnetShape.Sector,
         PolePairs = polePairs,
-        PitchRadius = 0.5 * (innerRadius + outerRadius),
-        Length = outerRadius - innerRadius,
-        ArcFraction = arcFraction,
+        Outline = new()
+        {
+            Shape = MagnetShape.Sector,
+            PitchRadius = 0.5 * (innerRadius + outerRadius),
+            Length = outerRadius - innerRadius,
+            SectorAngle = arcFraction * Math.PI / polePairs,
+        },
     };
 
     /// <summary>Blocks in an endless row.</summary>
@@ -68,19 +62,31 @@ public readonly record struct MagnetGeometry
     /// <param name="length">Length across the travel [m].</param>
     /// <param name="width">Width along the travel [m].</param>
     /// <returns>The arrangement.</returns>
-    public static MagnetGeometry LinearBlock(double polePitch, double length, double width) => new()
+    public static MagnetRow LinearBlock(double polePitch, double length, double width) => new()
     {
-        Shape = MagnetShape.Block, PolePitch = polePitch, Length = length, Width = width,
+        PolePitch = polePitch, Outline = new() { Shape = MagnetShape.Block, Length = length, Width = width },
     };
 
     /// <summary>Round magnets in an endless row.</summary>
     /// <param name="polePitch">Distance between neighbouring magnets [m].</param>
     /// <param name="diameter">Magnet diameter [m].</param>
     /// <returns>The arrangement.</returns>
-    public static MagnetGeometry LinearDisc(double polePitch, double diameter) => new()
+    public static MagnetRow LinearDisc(double polePitch, double diameter) => new()
     {
-        Shape = MagnetShape.Disc, PolePitch = polePitch, Length = diameter, Width = diameter,
+        PolePitch = polePitch, Outline = new() { Shape = MagnetShape.Disc, Length = diameter, Width = diameter },
     };
+
+    /// <summary>Plan form of one magnet.</summary>
+    public MagnetShape Shape => Outline.Shape;
+
+    /// <summary>Radius of the magnet's centre from the machine axis [m]; zero for a linear row.</summary>
+    public double PitchRadius => Outline.PitchRadius;
+
+    /// <summary>Radial length, or length across the travel [m]; a disc's diameter.</summary>
+    public double Length => Outline.Length;
+
+    /// <summary>Width along the motion [m]; a disc's diameter; unused for a sector.</summary>
+    public double Width => Outline.Width;
 
     /// <summary>Whether the magnets form a linear row.</summary>
     public bool IsLinear => PolePairs == 0;
@@ -92,21 +98,16 @@ public readonly record struct MagnetGeometry
     public double OuterRadius => PitchRadius + (0.5 * Length);
 
     /// <summary>Farthest distance of magnet material from the axis; in a row, from the row's middle line across the travel [m].</summary>
-    public double Reach => Shape == MagnetShape.Block && !IsLinear ? double.Hypot(OuterRadius, 0.5 * Width) : OuterRadius;
+    public double Reach => IsLinear ? OuterRadius : MagnetPlacement.OutermostRadius(Outline);
 
     /// <summary>Half the angle of a sector magnet seen from the axis [rad].</summary>
-    public double SectorHalfAngle => ArcFraction * Math.PI / (2.0 * PolePairs);
+    public double SectorHalfAngle => 0.5 * Outline.SectorAngle;
 
     /// <summary>Pole pitch along the motion at the pitch radius [m].</summary>
     public double PitchArc => IsLinear ? PolePitch : Math.PI * PitchRadius / PolePairs;
 
     /// <summary>Face area of one magnet [m^2].</summary>
-    public double FaceArea => Shape switch
-    {
-        MagnetShape.Block => Length * Width,
-        MagnetShape.Disc => 0.25 * Math.PI * Length * Length,
-        _ => 2.0 * SectorHalfAngle * PitchRadius * Length,
-    };
+    public double FaceArea => MagnetPlacement.Extent(Outline) * Length;
 
     /// <summary>Length of the edge round one magnet's face [m].</summary>
     public double FacePerimeter => Shape switch
@@ -138,7 +139,7 @@ public readonly record struct MagnetGeometry
                 return "the magnets must lie outside the machine axis";
             }
 
-            return Shape == MagnetShape.Sector && !(ArcFraction is > 0.0 and <= 1.0)
+            return Shape == MagnetShape.Sector && !(Outline.SectorAngle > 0.0 && Outline.SectorAngle <= Math.PI / PolePairs)
                 ? "a sector magnet must cover more than none and at most all of its pole pitch"
                 : null;
         }
