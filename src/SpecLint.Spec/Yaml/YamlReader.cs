@@ -52,11 +52,24 @@ public static class YamlReader
         }
         catch (InvalidOperationException)
         {
-            // The library gives up without a place on some unbalanced text; the last part it understood is the nearest one.
-            var place = parser.Current is { } last ? new Region((int)last.End.Line, (int)last.End.Column, (int)last.End.Line, (int)last.End.Column + 1) : Region.Beginning;
-            faults.Add(new YamlFault("the brackets, braces or commas do not fit together from here on", place));
+            faults.Add(new YamlFault("the brackets, braces or commas do not fit together from here on", LastUnderstood(parser)));
+        }
+        catch (ArgumentException)
+        {
+            faults.Add(new YamlFault("a tag beginning with '!' stands after this place and is not complete; plain values are expected", LastUnderstood(parser)));
         }
 
-        return new YamlReadResult(text, root, [.. faults.OrderBy(f => f.Region)]);
+        return new YamlReadResult(text, root, [.. faults.Select(Widened).OrderBy(f => f.Region)]);
     }
+
+    /// <summary>The library gives up without a place on some text; the end of the last part it understood is the nearest one.</summary>
+    private static Region LastUnderstood(Parser parser) => parser.Current is { } last
+        ? new Region((int)last.End.Line, (int)last.End.Column, (int)last.End.Line, (int)last.End.Column + 1)
+        : Region.Beginning;
+
+    /// <summary>A place of no width would show nothing.</summary>
+    private static YamlFault Widened(YamlFault fault) =>
+        fault.Region is var (line, column, endLine, endColumn) && line == endLine && endColumn <= column
+            ? fault with { Region = fault.Region with { EndColumn = column + 1 } }
+            : fault;
 }

@@ -29,6 +29,7 @@ internal static class YamlSyntaxFault
         Has(said, "anchor or alias") ? "the name of an anchor '&name' or alias '*name' is missing here" :
         Has(said, "cannot start any token") ? "this character cannot begin a value; put the text in quotes" :
         Has(said, "unknown escape") ? "this escape is not known in a quoted text; use single quotes" :
+        Has(said, "wrong indentation") ? "a line of the quoted text opened here is not indented far enough" :
         Has(said, "quoted scalar") ? "the quotes opened here are not closed" :
         Has(said, "invalid mapping") || Has(said, "mapping values are not allowed") ? "a ':' stands here inside a value; check this line's indentation, or put text that holds ': ' in quotes" :
         Has(said, "simple key") ? "a ':' is missing after this key, or the line is indented wrongly" :
@@ -39,6 +40,11 @@ internal static class YamlSyntaxFault
         Has(said, "Block sequence entries") ? "a list item '-' stands here after a key; begin it on a line of its own" :
         Has(said, "node content") ? "a value is expected here" :
         Has(said, "document end") ? "text stands here after the end of the value; check quotes and brackets" :
+        Has(said, "document start") || Has(said, "expected token") ? "text stands here outside the document" :
+        Has(said, "block scalar") ? "the first line of a text after '|' or '>' is indented less than an empty line above it" :
+        Has(said, "comment") ? "a comment '#' needs a space before it" :
+        Has(said, "Mapping keys are not allowed") ? "a '?' stands here; put text that begins with it in quotes" :
+        Has(said, "nchor") ? "an anchor '&name' cannot stand here" :
         Has(said, "incompatible") || Has(said, "directive") ? "the directive '%' here is not one of YAML 1.2" :
         "this is not YAML; check indentation, quotes and brackets near here";
 

@@ -1,4 +1,6 @@
+using System.Reflection;
 using System.Text.Json;
+using System.Text.RegularExpressions;
 using Newtonsoft.Json.Linq;
 using NJsonSchema;
 using NJsonSchema.Validation;
@@ -104,6 +106,57 @@ public sealed class SpecSchemaTests
                 Assert.True(isRead, $"{entry.Key} {text} {problem}");
             }
         }
+    }
+
+    [Theory]
+    [InlineData("2.0 ± 0.2 mm", true)]
+    [InlineData("1.30 T ± 3 %", true)]
+    [InlineData("2.0 mm +0.3/-0.1 mm", true)]
+    [InlineData("-0.12 %/K", true)]
+    [InlineData(".5 A/mm2", true)]
+    [InlineData("15°", true)]
+    [InlineData("1.5", false)]
+    [InlineData("1e5", false)]
+    [InlineData("1,5 mm", false)]
+    [InlineData("thick", false)]
+    public void Schema_PatternForEditors_AsksForNumberAndUnit(string text, bool isTaken)
+    {
+        var patterns = AllNodes().Where(n => n.Schema.TryGetProperty("pattern", out _)).Select(n => n.Schema.GetProperty("pattern").GetString()!).Distinct().Where(p => p != "^none$").ToList();
+
+        string pattern = Assert.Single(patterns);
+        Assert.Equal(isTaken, Regex.IsMatch(text, pattern, RegexOptions.None, TimeSpan.FromSeconds(1)));
+    }
+
+    [Fact]
+    public void Schema_Examples_MatchTheirPattern()
+    {
+        foreach (var (path, schema) in AllNodes().Where(n => n.Schema.TryGetProperty("pattern", out _)))
+        {
+            string pattern = schema.GetProperty("pattern").GetString()!;
+            Assert.All(
+                schema.GetProperty("examples").EnumerateArray().Where(e => e.ValueKind == JsonValueKind.String),
+                e => Assert.True(Regex.IsMatch(e.GetString()!, pattern, RegexOptions.None, TimeSpan.FromSeconds(1)), $"{path} {e}"));
+        }
+    }
+
+    [Fact]
+    public void PublicSignatures_OfTheProject_NameNoPackageTypes()
+    {
+        var own = typeof(KeyCatalogue).Assembly;
+        var named = own.GetExportedTypes()
+            .SelectMany(t => t.GetMembers(BindingFlags.Public | BindingFlags.Instance | BindingFlags.Static | BindingFlags.DeclaredOnly))
+            .SelectMany(m => m switch
+            {
+                MethodInfo method => method.GetParameters().Select(p => p.ParameterType).Append(method.ReturnType),
+                PropertyInfo property => [property.PropertyType],
+                ConstructorInfo constructor => constructor.GetParameters().Select(p => p.ParameterType),
+                FieldInfo field => [field.FieldType],
+                _ => [],
+            })
+            .SelectMany(t => t.IsGenericType ? [t, .. t.GetGenericArguments()] : (Type[])[t])
+            .Select(t => t.Assembly.GetName().Name!);
+
+        Assert.All(named, name => Assert.True(name.StartsWith("System", StringComparison.Ordinal) || name == own.GetName().Name, name));
     }
 
     [Fact]
