@@ -19,6 +19,11 @@ internal static class ReviewCommand
         var sarif = new Option<string?>("--sarif") { Description = "Also write the findings as a SARIF 2.1.0 log.", HelpName = "FILE" };
         Option<string> format = Shared.Words("--format", "What to print.", "text", "json");
         Option<string[]> rulebooks = Shared.Rulebook();
+        var house = new Option<string?>("--house")
+        {
+            Description = "A house file (YAML): further rulebooks, other bounds and grades, waivers for every spec.",
+            HelpName = "FILE",
+        };
         Option<string> failAt = Shared.Words("--fail-at", "The least grade of a finding that makes the exit code 1.", "hold", "query", "remark");
         var all = new Option<bool>("--all") { Description = "Also report the rules that are met, open or not applicable." };
         Option<string[]> set = Shared.Set();
@@ -46,7 +51,7 @@ internal static class ReviewCommand
         var leaveOutWaived = new Option<bool>("--without-waived") { Description = "Leave waived findings out of the SARIF log, for hosts that would show them as unanswered." };
         var command = new Command("review", "Reviews specs: findings first, then the machine's figures, its hazards and the outcome.")
         {
-            paths, sarif, format, rulebooks, failAt, all, set, on, stdinPath, leaveOutWaived,
+            paths, sarif, format, rulebooks, house, failAt, all, set, on, stdinPath, leaveOutWaived,
         };
         command.SetAction(parsed => (int)ReviewRun.Execute(
             new ReviewRequest
@@ -55,6 +60,7 @@ internal static class ReviewCommand
                 SarifPath = parsed.GetValue(sarif),
                 PrintsJson = parsed.GetValue(format) == "json",
                 Rulebooks = parsed.GetValue(rulebooks) ?? [],
+                HousePath = parsed.GetValue(house),
                 FailAt = parsed.GetValue(failAt) switch { "remark" => Grade.Remark, "query" => Grade.Query, _ => Grade.Hold },
                 IncludesAll = parsed.GetValue(all),
                 Changes = parsed.GetValue(set) ?? [],

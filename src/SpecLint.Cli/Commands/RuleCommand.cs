@@ -19,7 +19,7 @@ internal static class RuleCommand
         command.SetAction(parsed =>
         {
             string wanted = parsed.GetValue(id)!;
-            var rules = RulebookSource.Load(parsed.GetValue(rulebooks) ?? []).SelectMany(b => b.Rules).ToList();
+            var rules = RulebookSource.Load(parsed.GetValue(rulebooks) ?? []).Books.SelectMany(b => b.Rules).ToList();
             Rule? rule = rules.Find(r => string.Equals(r.Id, wanted, StringComparison.OrdinalIgnoreCase));
             if (rule is null)
             {

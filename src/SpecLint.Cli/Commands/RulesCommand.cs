@@ -15,7 +15,7 @@ internal static class RulesCommand
         var command = new Command("rules", "Lists the rules with their grades.") { rulebooks, format };
         command.SetAction(parsed =>
         {
-            IEnumerable<Rule> rules = RulebookSource.Load(parsed.GetValue(rulebooks) ?? []).SelectMany(b => b.Rules);
+            IEnumerable<Rule> rules = RulebookSource.Load(parsed.GetValue(rulebooks) ?? []).Books.SelectMany(b => b.Rules);
             if (parsed.GetValue(format) == "json")
             {
                 streams.Output.Flush();

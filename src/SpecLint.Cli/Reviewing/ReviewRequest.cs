@@ -13,6 +13,8 @@ internal sealed record ReviewRequest
 
     public IReadOnlyList<string> Rulebooks { get; init; } = [];
 
+    public string? HousePath { get; init; }
+
     public Grade FailAt { get; init; } = Grade.Hold;
 
     public bool IncludesAll { get; init; }

@@ -23,11 +23,11 @@ internal static class ReviewRun
     {
         // Start-up is most of a cold review: the schema and the rulebooks load beside the reading of the first spec.
         _ = SchemaCheck.Prepare();
-        Task<ImmutableArray<Rulebook>> loading = Task.Run(() => RulebookSource.Load(request.Rulebooks));
+        Task<RulebookSource> loading = Task.Run(() => RulebookSource.Load(request.Rulebooks, request.HousePath));
         var problems = new List<string>();
         IReadOnlyList<string> files = SpecFiles.Expand(request.Paths, problems);
         IReadOnlyList<Attempt> attempted = files.Count == 1 ? [ReviewOne(files[0], request, loading, streams)] : [];
-        ImmutableArray<Rulebook> books = loading.GetAwaiter().GetResult();
+        ImmutableArray<Rulebook> books = loading.GetAwaiter().GetResult().Books;
         SheetOptions sheet = Terminal.SheetOptions(request.IncludesAll);
         SarifLogBuilder? log = request.SarifPath is null ? null : NewLog(request, books);
         var summary = new SummaryTable();
@@ -116,13 +116,13 @@ internal static class ReviewRun
     }
 
     /// <summary>The reviews of many specs, computed side by side and handed out in the order of the paths.</summary>
-    private static ParallelQuery<Attempt> InParallel(IReadOnlyList<string> files, ReviewRequest request, Task<ImmutableArray<Rulebook>> books, Streams streams) => files
+    private static ParallelQuery<Attempt> InParallel(IReadOnlyList<string> files, ReviewRequest request, Task<RulebookSource> rules, Streams streams) => files
         .AsParallel()
         .AsOrdered()
         .WithMergeOptions(ParallelMergeOptions.NotBuffered)
-        .Select(file => ReviewOne(file, request, books, streams));
+        .Select(file => ReviewOne(file, request, rules, streams));
 
-    private static Attempt ReviewOne(string file, ReviewRequest request, Task<ImmutableArray<Rulebook>> books, Streams streams)
+    private static Attempt ReviewOne(string file, ReviewRequest request, Task<RulebookSource> rules, Streams streams)
     {
         SpecDocument spec;
         try
@@ -135,13 +135,15 @@ internal static class ReviewRun
         }
 
         FigureGraph? graph = ReadingReview.LeavesMachine(spec) ? new FigureGraph(spec, OurFigures.Catalogue) : null;
-        if (graph is not null && !books.IsCompleted)
+        if (graph is not null && !rules.IsCompleted)
         {
             // The costliest figure that nearly every review needs; the rulebooks are still loading.
             _ = graph["coil.hole.worth"];
         }
 
-        return new Attempt(Reviewer.Review(spec, graph, books.GetAwaiter().GetResult(), new ReviewOptions { On = request.On }), "");
+        RulebookSource source = rules.GetAwaiter().GetResult();
+        var options = new ReviewOptions { On = request.On, Waivers = source.Waivers };
+        return new Attempt(Reviewer.Review(spec, graph, source.Books, options), "");
     }
 
     private readonly record struct Attempt(MachineReview? Review, string Problem);

@@ -1,44 +1,65 @@
 using System.Collections.Immutable;
 using System.Globalization;
 using SpecLint.Review.Catalogue;
+using SpecLint.Review.Findings;
 using SpecLint.Review.Rules;
 
 namespace SpecLint.Cli.Reviewing;
 
-/// <summary>Our own rulebooks and those named on the command line.</summary>
-internal static class RulebookSource
+/// <summary>The rules of a review: our rulebooks, those named on the command line, and what a house file changes.</summary>
+/// <param name="Books">The rulebooks with the house's bounds and grades.</param>
+/// <param name="Waivers">The house's waivers.</param>
+internal sealed record RulebookSource(ImmutableArray<Rulebook> Books, ImmutableArray<Waiver> Waivers)
 {
     private const int MostFaultsShown = 20;
 
-    /// <summary>Loads our rulebooks and the given files.</summary>
+    /// <summary>Loads our rulebooks, the given files, and a house file.</summary>
     /// <param name="paths">Rulebook files of the user.</param>
-    /// <exception cref="CannotRunException">A rulebook cannot be read or is faulty.</exception>
-    public static ImmutableArray<Rulebook> Load(IReadOnlyList<string> paths)
+    /// <param name="housePath">House file, or null.</param>
+    /// <exception cref="CannotRunException">A file cannot be read or is faulty.</exception>
+    public static RulebookSource Load(IReadOnlyList<string> paths, string? housePath = null)
     {
-        ImmutableArray<Rulebook> own = OurRulebooks.All;
-        if (paths.Count == 0)
-        {
-            return own;
-        }
-
-        var books = own.ToBuilder();
+        ImmutableArray<Rulebook>.Builder books = OurRulebooks.All.ToBuilder();
         foreach (string path in paths)
         {
-            Rulebook book = OurRulebooks.LoadFurther(path, ReadBytes(path));
-            if (!book.Faults.IsEmpty)
-            {
-                IEnumerable<string> lines = book.Faults.Take(MostFaultsShown).Select(f => string.Create(
-                    CultureInfo.InvariantCulture, $"{path}, line {f.Region.StartLine}, column {f.Region.StartColumn}: {f.Message}"));
-                throw new CannotRunException(string.Join("\nspec-lint: ", lines));
-            }
-
-            books.Add(book);
+            books.Add(LoadBook(path));
         }
 
-        return books.ToImmutable();
+        if (housePath is null)
+        {
+            return new RulebookSource(books.ToImmutable(), []);
+        }
+
+        byte[] bytes = ReadBytes(housePath, "house file");
+        string folder = Path.GetDirectoryName(housePath) ?? "";
+        foreach (string path in HouseLoader.ReadRulebookPaths(bytes))
+        {
+            books.Add(LoadBook(Path.Combine(folder, path)));
+        }
+
+        House house = HouseLoader.Load(bytes, OurRulebooks.Scope, books.ToImmutable());
+        Refuse(housePath, house.Faults);
+        return new RulebookSource(house.Books, house.Waivers);
     }
 
-    private static byte[] ReadBytes(string path)
+    private static Rulebook LoadBook(string path)
+    {
+        Rulebook book = OurRulebooks.LoadFurther(path, ReadBytes(path, "rulebook"));
+        Refuse(path, book.Faults);
+        return book;
+    }
+
+    private static void Refuse(string path, ImmutableArray<RulebookFault> faults)
+    {
+        if (!faults.IsEmpty)
+        {
+            IEnumerable<string> lines = faults.Take(MostFaultsShown).Select(f => string.Create(
+                CultureInfo.InvariantCulture, $"{path}, line {f.Region.StartLine}, column {f.Region.StartColumn}: {f.Message}"));
+            throw new CannotRunException(string.Join("\nspec-lint: ", lines));
+        }
+    }
+
+    private static byte[] ReadBytes(string path, string what)
     {
         try
         {
@@ -46,7 +67,7 @@ internal static class RulebookSource
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException or NotSupportedException)
         {
-            throw new CannotRunException($"{path}: {(e is FileNotFoundException or DirectoryNotFoundException ? "there is no such rulebook" : e.Message)}", e);
+            throw new CannotRunException($"{path}: {(e is FileNotFoundException or DirectoryNotFoundException ? $"there is no such {what}" : e.Message)}", e);
         }
     }
 }

@@ -9,7 +9,8 @@ namespace SpecLint.Review.Catalogue;
 /// <summary>Figures of wire and winding: diameters, fill, resistance, inductance, copper mass.</summary>
 internal static class ConductorFigures
 {
-    private const double PaperAndLeads = 0.02;
+    /// <summary>Winding tension, leads and crossings move resistance and mass by about this share, common practice.</summary>
+    private const double WorkshopSpread = 0.02;
 
     /// <summary>The wire of one coil with its turns.</summary>
     public static PartDefinition<Shape<WindingWire>> Wire { get; } = new("wire of one coil", ReadWire);
@@ -31,7 +32,7 @@ internal static class ConductorFigures
             x.Value(x.Figure("fill.conductors") * x.Figure("wire.section") / x.Figure("coil.section"))),
         Define.Figure("fill.conductors-that-fit", FigureUnit.Ratio, "enamelled wires that lie in the leg in whole layers, nested or square, whichever holds more", "whole layers of {wire.overall-diameter} in {winding.coil.leg-width} × {winding.coil.thickness}", Sources.Geometry, ThatFit),
         Define.Figure("resistance.coil.cold", FigureUnit.Ohm, "resistance of one coil at 20 °C", "ρ20 × {winding.turns} × {coil.turn-length.mean} / ({winding.strands} × {wire.section})", Sources.Ohm, x =>
-            x.Part(Wire) is { } wire ? x.Value(WindingResistance.OfCoil(wire.Outline, ConductorMaterial.ReferenceTemperature)) : x.Stop()) with { MethodUncertainty = PaperAndLeads },
+            x.Part(Wire) is { } wire ? x.Value(WindingResistance.OfCoil(wire.Outline, ConductorMaterial.ReferenceTemperature)) : x.Stop()) with { MethodUncertainty = WorkshopSpread },
         Define.Figure("resistance.phase.cold", FigureUnit.Ohm, "resistance of one phase at 20 °C, leads not counted", "{resistance.coil.cold} × coils in series / parallel paths", Sources.Ohm, x =>
             x.Value(x.Figure("resistance.coil.cold") * x.Figure("winding.series-coils.each") / WindingParts.ParallelPaths(x))),
         Define.Figure("resistance.phase.hot", FigureUnit.Ohm, "resistance of one phase at the computed mean winding temperature", "{resistance.phase.cold} × (1 + α × ({temperature.winding.mean} − 20 °C))", Sources.Ohm, HotResistance),
@@ -39,9 +40,13 @@ internal static class ConductorFigures
         {
             double coils = x.Number("winding.coils");
             return x.Part(Wire) is { } wire ? x.Value(coils * WindingResistance.CoilMass(wire.Outline)) : x.Stop();
-        }) with { MethodUncertainty = PaperAndLeads },
+        }) with { MethodUncertainty = WorkshopSpread },
         Define.Figure("inductance.coil", FigureUnit.Henry, "self inductance of one coil between the iron planes", "∫ |W(k)|² × response of the coil layer dk, times {winding.turns}²", Sources.Inductance, x =>
             x.Part(Inductances) is { } coils ? x.Value(coils.Self) : x.Stop()) with { MethodUncertainty = 0.05 },
+        Define.Figure("inductance.mutual", FigureUnit.Henry, "mutual inductance of two neighbouring coils wound in the same sense, between the iron planes; negative side by side", "∫ W(k)·W(k)·cos(k·distance) × response of the coil layer dk, times {winding.turns}²", Sources.Inductance, x =>
+            x.Part(Inductances) is not { } coils ? x.Stop()
+            : coils.Coils < 2 ? x.NotApplicable("a single coil has no neighbour")
+            : x.Value(coils.Between(0, 1))) with { MethodUncertainty = 0.1 },
         Define.Figure("inductance.phase", FigureUnit.Henry, "synchronous inductance of one phase, self minus mutual", "self and mutual inductances of the phase's coils with the senses and paths of the connection", Sources.Inductance, x =>
             x.Part(Phase) is { } phase ? x.Value(phase.Outline.Synchronous) : x.Stop()) with { MethodUncertainty = 0.05 },
     ];
@@ -162,6 +167,6 @@ internal static class ConductorFigures
         ConductorMaterial material = wire.Outline.Material;
         double hot = cold * material.ResistivityAt(mean) / material.Resistivity;
         double slope = cold * material.TemperatureCoefficient * x.Look("temperature.winding.mean").Uncertainty;
-        return x.Value(hot, double.Hypot(slope, PaperAndLeads * hot));
+        return x.Value(hot, double.Hypot(slope, WorkshopSpread * hot));
     }
 }

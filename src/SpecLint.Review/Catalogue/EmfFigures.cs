@@ -14,6 +14,8 @@ internal static class EmfFigures
 
     private static readonly ImmutableArray<int> Orders = [3, 5, 7, 9, 11, 13, 15];
 
+    private static readonly ImmutableArray<int> EmfOrders = [3, 5, 7];
+
     /// <summary>Linkage harmonics per turn at 20 °C.</summary>
     public static PartDefinition<FluxLinkageHarmonics> Linkage { get; } = new("flux linkage of one turn", ReadLinkage);
 
@@ -44,6 +46,10 @@ internal static class EmfFigures
         AtSpeed("emf.line.peak.hot", "peak line EMF at rated speed with magnets at their working temperature", LineWave, w => w.Peak, hot: true),
         Define.Figure("emf.phase.distortion", FigureUnit.Percent, "total harmonic distortion of the phase EMF", "rms of the harmonics over the rms of the fundamental", Sources.Emf, x => Of(x, PhaseWave, w => w.Distortion)) with { MethodUncertainty = 0.02 },
         Define.Figure("emf.line.distortion", FigureUnit.Percent, "total harmonic distortion of the line EMF", "rms of the harmonics over the rms of the fundamental", Sources.Emf, x => Of(x, LineWave, w => w.Distortion)) with { MethodUncertainty = 0.02 },
+        .. EmfOrders.Select(EmfHarmonic),
+        Define.Figure("emf.phase.crest", FigureUnit.Ratio, "peak over rms of the phase EMF's waveform; a sine has 1.414", "peak of the waveform summed from its harmonics over its rms", Sources.Emf, x => Of(x, PhaseWave, w => w.CrestFactor)) with { MethodUncertainty = 0.005 },
+        Define.Figure("linkage.coil.fundamental.hot", FigureUnit.Weber, "peak fundamental flux linkage of one coil with magnets at their working temperature", "{linkage.coil.fundamental} × {magnet.remanence.hot} / {magnet.remanence}", Sources.Emf, x =>
+            x.Value(x.Figure("linkage.coil.fundamental") * x.Figure("magnet.remanence.hot") / x.Figure("magnet.remanence"))),
         Define.Figure("emf.dead-time", FigureUnit.Percent, "share of the period in which the coil's EMF is under 5 % of its peak", "waveform of the coil's EMF from its harmonics", Sources.Emf, x => Of(x, CoilEmf, w => w.ShareBelow(DeadShareOfPeak))) with { MethodUncertainty = 0.02 },
     ];
 
@@ -55,6 +61,15 @@ internal static class EmfFigures
             "as {linkage.turn.fundamental}, electrical order " + order.ToString(CultureInfo.InvariantCulture),
             Sources.Field,
             x => Turn(x, order)) with { MethodUncertainty = 0.01 };
+
+    private static FigureDefinition EmfHarmonic(int order) =>
+        Define.Figure(
+            string.Create(CultureInfo.InvariantCulture, $"emf.phase.harmonic-{order}"),
+            FigureUnit.Percent,
+            string.Create(CultureInfo.InvariantCulture, $"amplitude of harmonic {order} of the phase EMF over its fundamental"),
+            "order × linkage harmonic × distribution factor of that order, over the same of order 1",
+            Sources.Emf,
+            x => Of(x, PhaseWave, w => w.Amplitudes[(order - 1) / 2].Magnitude / w.Fundamental)) with { MethodUncertainty = 0.02 };
 
     private static FigureDefinition AtSpeed(string name, string meaning, PartDefinition<HarmonicWaveform> wave, Func<HarmonicWaveform, double> reduce, bool hot) =>
         Define.Figure(

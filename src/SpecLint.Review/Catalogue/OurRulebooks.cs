@@ -9,6 +9,9 @@ public static class OurRulebooks
 {
     private static readonly Lazy<ImmutableArray<Rulebook>> Loaded = new(Load);
 
+    /// <summary>What expressions of a rulebook or a house file may name: our figures, the spec's keys, our tables.</summary>
+    public static ExpressionScope Scope => new(OurFigures.Catalogue, EmbeddedRulebooks.Tables);
+
     /// <summary>All rulebooks, in ordinal order of their names.</summary>
     /// <exception cref="InvalidOperationException">A rulebook of the program is faulty.</exception>
     public static ImmutableArray<Rulebook> All => Loaded.Value;
@@ -18,8 +21,7 @@ public static class OurRulebooks
     /// <param name="bytes">Its content.</param>
     public static Rulebook LoadFurther(string path, ReadOnlySpan<byte> bytes)
     {
-        var scope = new ExpressionScope(OurFigures.Catalogue, EmbeddedRulebooks.Tables);
-        Rulebook book = RulebookLoader.Load(path, bytes, scope, EmbeddedRulebooks.Texts());
+        Rulebook book = RulebookLoader.Load(path, bytes, Scope, EmbeddedRulebooks.Texts());
         var twins = RulebookLoader.FindTwins([.. All, book]).Where(t => ReferenceEquals(t.Book, book)).Select(t => t.Fault);
         return book with { Faults = [.. book.Faults, .. twins] };
     }

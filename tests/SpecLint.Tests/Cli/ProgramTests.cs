@@ -67,6 +67,7 @@ public sealed class ProgramTests : IDisposable
     [InlineData("review", "good.yaml", "--set", "winding.tuns=4")]
     [InlineData("review", "good.yaml", "--set", "winding.turns")]
     [InlineData("review", "good.yaml", "--rulebook", "absent.yaml")]
+    [InlineData("review", "good.yaml", "--house", "absent.yaml")]
     [InlineData("review", "good.yaml", "--sarif", "no-such-folder/a.sarif")]
     [InlineData("working", "good.yaml", "resistance.phase.cool")]
     [InlineData("rule", "FIT-99")]
@@ -246,6 +247,27 @@ public sealed class ProgramTests : IDisposable
 
         Assert.Equal(1, run.ExitCode);
         Assert.Contains("SHOP-01", run.Output, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Review_HouseFile_ChangesBoundsAndWaives()
+    {
+        _program.Write("wide.yaml", File.ReadAllText(Path.Combine(ExampleSpecs.Folder, "wind-1kw-wide-coils.yaml")));
+        _program.Write("house.yaml", """
+            house: Shed
+            rules:
+              FIT-04: {at-most: 1.7, grade: query, beyond: {at-most: 2.0, grade: hold}, why: "Our former allows it."}
+            waivers:
+              - {rule: OUT-01, reason: "charged through a step-up converter", approved-by: "second engineer", until: 2030-01-31}
+            """);
+
+        ProcessOutcome without = _program.Run("review", "wide.yaml");
+        ProcessOutcome with = _program.Run("review", "wide.yaml", "--house", "house.yaml", "--on", "2027-01-01");
+
+        Assert.Equal(1, without.ExitCode);
+        Assert.Equal(0, with.ExitCode);
+        Assert.Contains("waived hold: OUT-01", with.Output, StringComparison.Ordinal);
+        Assert.DoesNotContain("FIT-04  Coil hole", with.Output, StringComparison.Ordinal);
     }
 
     [Fact]

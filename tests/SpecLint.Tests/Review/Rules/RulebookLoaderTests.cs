@@ -173,6 +173,39 @@ public sealed class RulebookLoaderTests
     }
 
     [Fact]
+    public void HugeRulebook_IsReadInBoundedTime()
+    {
+        var text = new StringBuilder("rulebook: a\nrules:\n");
+        string chain = string.Join(" + ", Enumerable.Repeat("winding.coil.hole-widht", 70));
+        for (int i = 0; text.Length < 1_900_000; i++)
+        {
+            text.Append(System.Globalization.CultureInfo.InvariantCulture, $"  - {{id: A-{i}, title: t, measure: {chain}, at-most: 1 mm, grade: hold, say: s, why: w, basis: {{kind: derived}}}}\n");
+        }
+
+        var watch = System.Diagnostics.Stopwatch.StartNew();
+        Assert.Equal(200, Book(text.ToString()).Faults.Length);
+        Assert.InRange(watch.Elapsed.TotalSeconds, 0, 20);
+    }
+
+    [Fact]
+    public void Aliases_ThatMultiply_AreAFault()
+    {
+        var text = new StringBuilder("rulebook: a\nl0: &l0 [x, x, x, x, x, x, x, x, x]\n");
+        for (int i = 1; i < 12; i++)
+        {
+            text.Append(System.Globalization.CultureInfo.InvariantCulture, $"l{i}: &l{i} [{string.Join(", ", Enumerable.Repeat($"*l{i - 1}", 9))}]\n");
+        }
+
+        Assert.NotEmpty(Book(text.ToString()).Faults);
+    }
+
+    [Fact]
+    public void EmbeddedTables_LoadWithoutFault()
+    {
+        Assert.Empty(EmbeddedRulebooks.Tables.Faults);
+    }
+
+    [Fact]
     public void RandomBytes_NeverThrow() =>
         Gen.Byte.Array[0, 300].Sample(bytes => RulebookLoader.Load("r.yaml", bytes, Scope).Faults.Length > 0, iter: 3000);
 
