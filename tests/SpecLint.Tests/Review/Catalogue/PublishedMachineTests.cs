@@ -171,6 +171,16 @@ public sealed class PublishedMachineTests
         Machines.Near(1 + (0.00393 * (figures.Value("temperature.winding.mean") - 293.15)), hot / figures.Value("resistance.phase.cold"), 1e-6);
     }
 
+    [Fact]
+    public void FivePhases_CurrentOfTheRating_CarriesTheRatedPowerAtTheLineVoltage()
+    {
+        // P = m·U·I; the line voltage of five phases in star lies between the phases farthest apart, 2·sin 72° = 1.902 phase voltages.
+        string spec = Ring(12, 10, 80, "AWG 15", 0.2, "{remanence: 1.3 T}", "twin-rotor").Replace("speed: 120 rpm", "speed: 300 rpm, power: 500 W, voltage: 24 V", StringComparison.Ordinal);
+        FigureGraph figures = Machines.Figures(spec);
+
+        Machines.Near(500, 5 * 24 / 1.9021 * figures.Value("current.phase.rms"), 1e-4);
+    }
+
     private static double Rpm(FigureGraph figures) => figures.Value("speed.charging") * 60 / (2 * Math.PI);
 
     // A machine with ring coils of a given mean turn.
