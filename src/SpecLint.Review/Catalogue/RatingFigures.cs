@@ -14,7 +14,7 @@ internal static class RatingFigures
         Define.Figure("speed.overspeed", FigureUnit.AngularSpeed, "greatest speed the machine must survive", "{ratings.overspeed}, or 1.2 × the greater of {ratings.top-speed} and {ratings.speed}", new Basis(BasisKind.Standard, "IEC 60034-1, overspeed of a.c. machines: 1.2 times the maximum rated speed (from memory)"), Overspeed) with { LinearUnit = FigureUnit.Velocity },
         Define.Figure("frequency", FigureUnit.Hertz, "electrical frequency at rated speed", "{machine.pole-pairs} × {speed.rated} / 2π; linear: {speed.rated} / (2 × {magnet.pole-pitch})", Sources.Arithmetic, x => x.Value(ElectricalSpeed(x) / (2 * Math.PI))),
         Define.Figure("power.rated", FigureUnit.Watt, "rated power: electrical output of a generator, shaft output of a motor", "{ratings.power}", Sources.Arithmetic, x => x.Value(x.Number("ratings.power"))),
-        Define.Figure("power.declared-product", FigureUnit.Watt, "electrical power that the stated voltage and current give at unity power factor", "√3 × {ratings.voltage} × {ratings.current}, or their product after a bridge", Sources.Arithmetic, DeclaredProduct),
+        Define.Figure("power.declared-product", FigureUnit.Watt, "electrical power that the stated voltage and current give at unity power factor", "√3 × {ratings.voltage} × {ratings.current} (m phases: m over the line voltage per phase voltage), or their product after a bridge", Sources.Arithmetic, DeclaredProduct),
         Define.Figure("torque.rated", FigureUnit.NewtonMetre, "torque at the rating; linear: force", "{ratings.torque}, or {power.rated} over {speed.rated} (a generator's output over its efficiency)", Sources.Arithmetic, Torque) with { LinearUnit = FigureUnit.Newton },
         Define.Figure("current.phase.rms", FigureUnit.Ampere, "rms current of one phase at the rating", "{ratings.current}, or {ratings.power} over {ratings.voltage}, carried to the phase by {winding.connection} and, after a bridge, by the form factor of smooth direct current", Sources.Bridge, PhaseCurrent),
         Define.Figure("current.direct", FigureUnit.Ampere, "mean direct current after the bridge at the rating", "{ratings.current}, or {ratings.power} over {ratings.voltage}; from the line current by √(2/3)", Sources.Bridge, DirectCurrent),
@@ -54,7 +54,7 @@ internal static class RatingFigures
     private static Outcome DeclaredProduct(Evaluation x)
     {
         double product = x.Number("ratings.voltage") * x.Number("ratings.current");
-        return x.Value(IsAfterBridge(x) ? product : product * Math.Sqrt(x.Number("machine.phases")));
+        return x.Value(IsAfterBridge(x) ? product : product * PowerPerLineProduct(x));
     }
 
     private static Outcome Torque(Evaluation x)
@@ -66,6 +66,13 @@ internal static class RatingFigures
 
         double torque = x.Figure("power.rated") / x.Figure("speed.rated");
         return x.Text("machine.role") == "motor" ? x.Value(torque) : x.Value(torque / x.Figure("efficiency.rating"));
+    }
+
+    /// <summary>Power at unity power factor over line voltage × line current: √m to three phases; beyond, lines of the phases farthest apart.</summary>
+    private static double PowerPerLineProduct(Evaluation x)
+    {
+        double phases = x.Number("machine.phases");
+        return phases > 3 ? phases / (2 * Math.Sin(Math.PI * Math.Floor(phases / 2) / phases)) : Math.Sqrt(phases);
     }
 
     private static double StatedCurrent(Evaluation x)
@@ -85,7 +92,7 @@ internal static class RatingFigures
         bool motor = x.Text("machine.role") == "motor";
         double input = motor ? power / (x.Optional("ratings.efficiency") ?? 1) : power;
         double ratio = input / x.Number("ratings.voltage");
-        return IsAfterBridge(x) ? ratio : ratio / Math.Sqrt(x.Number("machine.phases"));
+        return IsAfterBridge(x) ? ratio : ratio / PowerPerLineProduct(x);
     }
 
     private static Outcome PhaseCurrent(Evaluation x)
