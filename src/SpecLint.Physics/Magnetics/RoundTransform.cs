@@ -5,11 +5,12 @@ namespace SpecLint.Physics.Magnetics;
 /// Solutions of the Helmholtz equation have a mean-value property, so a round figure multiplies the transform of its centre by a
 /// factor of the wave number alone: 2 pi a J1(k a)/k for a disc, the mean of that over the winding's radii for a ring of turns.
 /// J1(x) is the mean over the angle of sin(x sin a) sin a (Watson, 1944, section 2.2), a periodic integral that the trapezoid rule gives
-/// to rounding error once the points outnumber x.
+/// to rounding error once the points lead x by some ten times its cube root.
 /// </remarks>
 internal sealed class RoundTransform : IPlaneTransform
 {
-    private const double AngularMargin = 28.0;
+    private const double AngularMargin = 8.0;
+    private const double AngularLead = 10.0;
     private readonly double _centre;
     private readonly double _inner;
     private readonly double _outer;
@@ -80,7 +81,8 @@ internal sealed class RoundTransform : IPlaneTransform
 
         factor.Clear();
         double[] k = table.WaveNumbers;
-        int points = (int)Math.Ceiling(((k[^1] * _outer) + AngularMargin) / 4.0);
+        double phase = k[^1] * _outer;
+        int points = (int)Math.Ceiling((phase + AngularMargin + (AngularLead * Math.Cbrt(phase))) / 4.0);
         Span<double> moment = table.Line(6);
         bool ring = _outer > _inner;
         for (int j = 0; j < points; j++)

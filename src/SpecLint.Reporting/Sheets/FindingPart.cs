@@ -68,7 +68,9 @@ internal static class FindingPart
         Labelled(page, "at", ReviewWords.Place(review.Spec, finding.Region.StartLine));
         if (finding.Key.Length > 0)
         {
-            Labelled(page, "", ReviewWords.KeyWithValue(review.Spec, finding.Key));
+            // What the reader could not take has no value to show.
+            bool isFault = finding.Rule.Source == RuleSource.Reading;
+            Labelled(page, "", isFault ? Printable.Line(finding.Key) : ReviewWords.KeyWithValue(review.Spec, finding.Key));
         }
     }
 

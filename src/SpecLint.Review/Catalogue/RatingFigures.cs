@@ -75,6 +75,9 @@ internal static class RatingFigures
         return phases > 3 ? phases / (2 * Math.Sin(Math.PI * Math.Floor(phases / 2) / phases)) : Math.Sqrt(phases);
     }
 
+    /// <summary>Line current over phase current of a mesh: the difference of two neighbouring phases' currents, √3 for a delta.</summary>
+    private static double LineOverMeshCurrent(double phases) => 2 * Math.Sin(Math.PI / phases);
+
     private static double StatedCurrent(Evaluation x)
     {
         if (x.Optional("ratings.current") is { } current)
@@ -106,12 +109,12 @@ internal static class RatingFigures
             {
                 // Of single-phase bridges side by side, the phase of the highest EMF carries all of the direct current.
                 "separate-bridges" => x.Value(stated / Math.Sqrt(phases)),
-                "delta" => x.Value(stated * LineOverDirect / Math.Sqrt(3)),
+                "delta" => x.Value(stated * LineOverDirect / LineOverMeshCurrent(phases)),
                 _ => x.Value(stated * LineOverDirect),
             };
         }
 
-        return x.Value(connection == "delta" ? stated / Math.Sqrt(3) : stated);
+        return x.Value(connection == "delta" ? stated / LineOverMeshCurrent(phases) : stated);
     }
 
     private static Outcome DirectCurrent(Evaluation x)
