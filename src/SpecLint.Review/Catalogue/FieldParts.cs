@@ -121,7 +121,14 @@ internal static class FieldParts
         }
 
         double? permeability = EmbeddedRulebooks.Tables.Find("steels")?.FindRow("material", material)?.Number("relative-permeability");
-        return permeability is { } known ? Plate(x, section, known) : Plate(x, section, 1000);
+        if (permeability is { } known)
+        {
+            return Plate(x, section, known);
+        }
+
+        // A material that the table does not know is no help: the number itself is what is missing.
+        x.Miss($"{section}.material.relative-permeability");
+        return SteelPlate.None;
     }
 
     private static SteelPlate Plate(Evaluation x, string section, double permeability)

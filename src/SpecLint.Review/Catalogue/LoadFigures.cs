@@ -18,7 +18,7 @@ internal static class LoadFigures
         Define.Figure("bridge.diode-drop", FigureUnit.Volt, "forward drop of one diode of the bridge", "{load.bridge.diode-drop}", Sources.PracticeTable, DiodeDrop),
         Define.Figure("loss.bridge", FigureUnit.Watt, "loss in the bridge at the rating: two diodes carry the direct current", "2 × {bridge.diode-drop} × {current.direct}", Sources.Bridge, x =>
             x.Value(2 * x.Figure("bridge.diode-drop") * x.Figure("current.direct"))),
-        Define.Figure("voltage.rectified.rating", FigureUnit.Volt, "mean direct voltage at rated speed and current, hot", "1.35 × {emf.line.rms.hot} less two diode drops, the drop of two hot phases and the commutation drop 3ωL·I/π", Sources.Bridge, Rectified) with { MethodUncertainty = 0.03 },
+        Define.Figure("voltage.rectified.rating", FigureUnit.Volt, "mean direct voltage at rated speed and current, hot", "1.35 × {emf.line.rms.hot} less two diode drops, the drop of two hot phases (a delta: of two thirds of one) and the commutation drop 3ωL·I/π (a delta: a third of it); separate bridges: 3√2/π × {emf.phase.rms.hot} less two diode drops, the drop of one phase and 3ωL·I/π", Sources.Bridge, Rectified) with { MethodUncertainty = 0.03 },
         Define.Figure("voltage.load.needed", FigureUnit.Volt, "direct voltage that the load needs at the highest voltage stated for it", "{load.voltage}", Sources.Arithmetic, Needed),
         Define.Figure("voltage.overspeed.line-peak", FigureUnit.Volt, "peak line voltage at overspeed with the load lost and the coldest magnets", "{emf.line.peak} × {speed.overspeed} / {speed.rated} × {magnet.remanence.cold} / {magnet.remanence}", Sources.Emf, x =>
             x.Value(x.Figure("emf.line.peak") * x.Figure("speed.overspeed") / x.Figure("speed.rated") * x.Figure("magnet.remanence.cold") / x.Figure("magnet.remanence"))),
@@ -28,7 +28,9 @@ internal static class LoadFigures
         Define.Figure("speed.charging", FigureUnit.AngularSpeed, "speed at which charging begins: the peak line EMF equals the load voltage and two diode drops", "({load.voltage} + 2 × {bridge.diode-drop}) × {speed.rated} / {emf.line.peak}", Sources.Bridge, Charging) with { LinearUnit = FigureUnit.Velocity },
     ];
 
-    private static bool HasBridge(Evaluation x) =>
+    /// <summary>True when a rectifier stands behind the machine.</summary>
+    /// <param name="x">The evaluation.</param>
+    public static bool HasBridge(Evaluation x) =>
         x.OptionalText("load.kind") is "battery" or "grid-inverter" || RatingFigures.IsAfterBridge(x) || x.States("load.bridge");
 
     private static Outcome DiodeDrop(Evaluation x) =>
@@ -55,9 +57,11 @@ internal static class LoadFigures
 
         if (connection == "separate-bridges")
         {
-            // Single-phase bridges side by side: the phase of the highest EMF feeds the load, its mean is 3/π of the peak.
+            // Single-phase bridges side by side: the phase of the highest EMF feeds the load, its mean is 3/π of the peak. Six times a
+            // period the whole current passes from one phase to the next, as in a six-pulse bridge.
             double mean = 3 / Math.PI * Math.Sqrt(2) * x.Figure("emf.phase.rms.hot");
-            return x.Value(mean - drop - (resistance * current));
+            double passing = 3 / Math.PI * RatingFigures.ElectricalSpeed(x) * x.Figure("inductance.phase");
+            return x.Value(mean - drop - ((resistance + passing) * current));
         }
 
         // Seen from the line terminals a delta is a star of a third of its phase impedance.
