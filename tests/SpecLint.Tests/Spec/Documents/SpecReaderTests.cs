@@ -292,7 +292,9 @@ public sealed class SpecReaderTests
 
         Assert.NotEmpty(spec.Faults);
         Assert.All(spec.Faults, f => Assert.InRange(f.Message.Length, 5, 400));
-        Assert.InRange(clock.ElapsedMilliseconds, 0, 2000);
+
+        // A guard against hanging, wide enough for any machine; it says nothing about speed.
+        Assert.InRange(clock.Elapsed, TimeSpan.Zero, TimeSpan.FromSeconds(30));
     }
 
     [Fact]
