@@ -10,6 +10,9 @@ internal static class DemagnetisationFigures
     /// <summary>Share of the intrinsic coercivity up to which the demagnetisation line is taken as straight (the knee).</summary>
     private const double KneeShare = 0.9;
 
+    /// <summary>Sampling of the magnet's volume and its finite remanence band, relative to the opposing field.</summary>
+    private const double MethodBand = 0.04;
+
     private const string Knee = "1 − opposing field / (0.9 × least intrinsic coercivity)";
 
     /// <summary>Opposing field inside the installed magnet per tesla of remanence.</summary>
@@ -32,7 +35,7 @@ internal static class DemagnetisationFigures
         Define.Figure("demagnetisation.opposing-field.cold", FigureUnit.FieldStrength, "opposing field exceeded in 1 % of the installed magnet's volume, open circuit, at the coldest ambient", "image sums over the magnet's volume × {magnet.remanence.cold} / μ0", Sources.Field, x =>
             Opposing(x, Installed, "magnet.remanence.cold")) with { MethodUncertainty = 0.03 },
         Define.Figure("demagnetisation.margin", FigureUnit.Ratio, "margin to the knee at open circuit, hottest", Knee + " from {demagnetisation.opposing-field} and {magnet.coercivity-intrinsic.hot}", Sources.Field, x =>
-            Margin(x, "demagnetisation.opposing-field", "magnet.coercivity-intrinsic.hot")),
+            HotMargin(x)) with { IsCoarse = true },
         Define.Figure("demagnetisation.margin.cold", FigureUnit.Ratio, "ferrite: margin to the knee at open circuit, at the coldest ambient", Knee + " from {demagnetisation.opposing-field.cold} and {magnet.coercivity-intrinsic.cold}", Sources.Field, x =>
             MagnetFigures.IsFerrite(x)
                 ? Margin(x, "demagnetisation.opposing-field.cold", "magnet.coercivity-intrinsic.cold")
@@ -56,22 +59,42 @@ internal static class DemagnetisationFigures
     {
         double field = x.Figure(opposing);
         double knee = KneeShare * x.Figure(coercivity);
+        return x.Incomplete ? x.Stop() : x.Value(MarginOf(field, knee), MethodBand * Math.Min(1, field / Math.Max(knee, 1)));
+    }
+
+    /// <summary>
+    /// The margin at the magnets' estimated temperature; its band is the distance to the margin at the favourable end of that estimate,
+    /// computed there, because coercivity runs out faster than a straight line says.
+    /// </summary>
+    private static Outcome HotMargin(Evaluation x)
+    {
+        double field = x.Figure("demagnetisation.opposing-field");
+        double hot = x.Figure("magnet.remanence.hot");
+        double margin = MarginOf(field, KneeShare * x.Figure("magnet.coercivity-intrinsic.hot"));
+        double remanence = x.Figure("magnet.remanence");
+        double coercivity = x.Figure("magnet.coercivity-intrinsic");
+        double remanenceSlope = x.Figure("magnet.remanence-coefficient");
+        double coercivitySlope = x.Figure("magnet.coercivity-coefficient");
+        double temperature = x.Figure("temperature.magnet");
         if (x.Incomplete)
         {
             return x.Stop();
         }
 
-        if (knee <= 0)
+        double band = x.Look("temperature.magnet").Uncertainty;
+        double best = margin;
+        foreach (double end in (ReadOnlySpan<double>)[temperature - band, temperature + band])
         {
-            return x.Value(-1, 0);
+            double rise = end - MagnetFigures.ReferenceTemperature;
+            double fieldThere = field * remanence * (1 + (remanenceSlope * rise)) / Math.Max(hot, double.Epsilon);
+            best = Math.Max(best, MarginOf(fieldThere, KneeShare * coercivity * (1 + (coercivitySlope * rise))));
         }
 
-        double ratio = field / knee;
-        Outcome a = x.Look(opposing);
-        Outcome b = x.Look(coercivity);
-        double relative = double.Hypot(a.Uncertainty / Math.Max(a.Value, 1), b.Uncertainty / Math.Max(b.Value, 1));
-        return x.Value(1 - ratio, ratio * relative);
+        return x.Value(margin, double.Hypot(best - margin, MethodBand * (1 - margin)));
     }
+
+    /// <summary>1 − opposing field / knee; −1 where the field is twice the knee and more, or no coercivity is left.</summary>
+    private static double MarginOf(double field, double knee) => knee > 0 ? Math.Max(-1, 1 - (field / knee)) : -1;
 
     private static Outcome Known(Evaluation x) =>
         x.Look("magnet.coercivity-coefficient").HasValue

@@ -112,7 +112,7 @@ internal sealed class RuleReviewer(FigureGraph graph)
     {
         string sentence = MessageWriter.Say(rule, graph, measured: null);
         string message = lack is not { } unknown ? sentence
-            : $"Not known whether it exists ({MessageWriter.Lack(unknown)}); if so: {sentence}";
+            : $"Not known yet whether it concerns this machine ({MessageWriter.Lack(unknown)}).";
         if (lack is { Kind: EvaluatedKind.NotApplicable } no)
         {
             return NotApplicable(rule, MessageWriter.Lack(no));

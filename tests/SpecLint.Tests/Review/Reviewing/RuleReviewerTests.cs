@@ -191,7 +191,7 @@ public sealed class RuleReviewerTests
     [Theory]
     [InlineData("when: test.force > 200 N\nsay: 'They pull with {test.force}; {load.voltage} at the terminals.'", FindingKind.Hazard, "They pull with 250 N; unknown (needs load.voltage) at the terminals.")]
     [InlineData("when: test.force > 300 N", FindingKind.NotApplicable, "Not applicable: concerns machines with test.force > 300 N.")]
-    [InlineData("when: load.voltage > 50 V", FindingKind.Hazard, "Not known whether it exists (needs load.voltage); if so: Said.")]
+    [InlineData("when: load.voltage > 50 V", FindingKind.Hazard, "Not known yet whether it concerns this machine (needs load.voltage).")]
     public void Hazard_IsReportedWhereItExistsOrIsUnknown(string fields, FindingKind kind, string message)
     {
         Finding finding = ReviewRule("source: hazard\n" + fields);
