@@ -48,7 +48,8 @@ internal static class WindingFigures
         int phases = x.Count("machine.phases");
         if (!x.Incomplete && coils < phases)
         {
-            return x.OutOfDomain("there are fewer coils than phases");
+            // A phase without a coil is as far from a balanced set as can be.
+            return x.Value(1);
         }
 
         return x.Part(WindingParts.Layout) is { } layout ? x.Value(layout.IsBalanced ? 0 : layout.Imbalance) : x.Stop();
