@@ -40,6 +40,9 @@ internal static class FieldFigures
         Define.Figure("field.coil.highest", FigureUnit.Tesla, "highest flux density through the coil's thickness on a pole centre", "image sums over the coil's thickness", Sources.Field, x => Extreme(x, e => e.Highest)) with { MethodUncertainty = 0.005 },
         Define.Figure("flux.pole", FigureUnit.Weber, "flux of one pole through the plane at the coil's middle, all radii", "integral of the harmonic solution between the interpole lines, times {magnet.remanence}", Sources.Field, PoleFluxAtCoil) with { MethodUncertainty = 0.005 },
         Define.Figure("force.attraction", FigureUnit.Newton, "total attraction between the rotor discs, or between rotor and plate", "Σ π∫ k·(T·M)² dk / 2μ0 over the plane where the field is normal", Sources.Field, Attraction) with { MethodUncertainty = 0.015 },
+        Define.Figure("back-iron.permeability", FigureUnit.Ratio, "relative permeability of the steel behind the magnets", "{rotor.back-iron.material.relative-permeability}, or table steels at {rotor.back-iron.material}", Sources.PracticeTable, x => Permeability(x, "rotor.back-iron")),
+        Define.Figure("return-plate.permeability", FigureUnit.Ratio, "relative permeability of the return plate", "{rotor.return-plate.material.relative-permeability}, or table steels at {rotor.return-plate.material}", Sources.PracticeTable, x =>
+            MachineParts.FacingOf(x) == Facing.Plate ? Permeability(x, "rotor.return-plate") : x.NotApplicable("there is no return plate")),
         Define.Figure("flux-density.back-iron", FigureUnit.Tesla, "flux density in the steel behind the magnets, linear solution", "half of the pole's flux over {rotor.back-iron.thickness} × {magnet.length}", new Basis(BasisKind.Derived, "continuity of flux: each disc carries half a pole's flux each way"), x => PlateFlux(x, "rotor.back-iron")) with { MethodUncertainty = 0.1 },
         Define.Figure("flux-density.return-plate", FigureUnit.Tesla, "flux density in the return plate, linear solution", "half of the pole's flux over {rotor.return-plate.thickness} × {magnet.length}", new Basis(BasisKind.Derived, "continuity of flux: the plate carries half a pole's flux each way"), x =>
             MachineParts.FacingOf(x) == Facing.Plate ? PlateFlux(x, "rotor.return-plate") : x.NotApplicable("there is no return plate")) with { MethodUncertainty = 0.1 },
@@ -168,6 +171,11 @@ internal static class FieldFigures
         double thickness = x.Number($"{section}.thickness");
         return x.Part(Flux) is { } flux && !x.Incomplete ? x.Value(flux.PlateFluxDensity(thickness, remanence)) : x.Stop();
     }
+
+    private static Outcome Permeability(Evaluation x, string section) =>
+        x.OptionalText(section) == "none" || x.OptionalText($"{section}.material") == "ideal" ? x.NotApplicable("there is no plate of finite permeability here")
+        : FieldParts.PermeabilityOf(x, section) is { } permeability ? x.Value(permeability)
+        : x.Stop();
 
     private static Outcome SaturationLoss(Evaluation x)
     {

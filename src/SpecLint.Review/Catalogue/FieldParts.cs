@@ -109,26 +109,30 @@ internal static class FieldParts
             return SteelPlate.None;
         }
 
+        return x.OptionalText($"{section}.material") == "ideal" ? SteelPlate.Ideal
+            : PermeabilityOf(x, section) is { } permeability ? Plate(x, section, permeability)
+            : SteelPlate.None;
+    }
+
+    /// <summary>Relative permeability of a plate as stated or by its material; recorded as missing and null where neither tells it.</summary>
+    /// <param name="x">The evaluation.</param>
+    /// <param name="section">The plate's key.</param>
+    public static double? PermeabilityOf(Evaluation x, string section)
+    {
         if (x.Optional($"{section}.material.relative-permeability") is { } stated)
         {
-            return Plate(x, section, stated);
+            return stated;
         }
 
         string material = x.Text($"{section}.material");
-        if (material == "ideal")
+        double? known = EmbeddedRulebooks.Tables.Find("steels")?.FindRow("material", material)?.Number("relative-permeability");
+        if (known is null && material.Length > 0)
         {
-            return SteelPlate.Ideal;
+            // A material that the table does not know is no help: the number itself is what is missing.
+            x.Miss($"{section}.material.relative-permeability");
         }
 
-        double? permeability = EmbeddedRulebooks.Tables.Find("steels")?.FindRow("material", material)?.Number("relative-permeability");
-        if (permeability is { } known)
-        {
-            return Plate(x, section, known);
-        }
-
-        // A material that the table does not know is no help: the number itself is what is missing.
-        x.Miss($"{section}.material.relative-permeability");
-        return SteelPlate.None;
+        return known;
     }
 
     private static SteelPlate Plate(Evaluation x, string section, double permeability)
