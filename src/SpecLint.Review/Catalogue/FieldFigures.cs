@@ -10,6 +10,7 @@ internal static class FieldFigures
 {
     private const double ImplantCaution = 0.5e-3;
     private const double SaturationOnset = 1.6;
+    private const double SaturationLimit = 1.8;
 
     /// <summary>The field over a pole's centre, up to the magnets' face.</summary>
     public static PartDefinition<PoleCentreField> PoleCentre { get; } = new("image sums of the field over a pole's centre", x => x.Part(FieldParts.RotorField) is { } solved ? new PoleCentreField(solved) : null);
@@ -43,6 +44,10 @@ internal static class FieldFigures
         Define.Figure("back-iron.permeability", FigureUnit.Ratio, "relative permeability of the steel behind the magnets", "{rotor.back-iron.material.relative-permeability}, or table steels at {rotor.back-iron.material}", Sources.PracticeTable, x => Permeability(x, "rotor.back-iron")),
         Define.Figure("return-plate.permeability", FigureUnit.Ratio, "relative permeability of the return plate", "{rotor.return-plate.material.relative-permeability}, or table steels at {rotor.return-plate.material}", Sources.PracticeTable, x =>
             MachineParts.FacingOf(x) == Facing.Plate ? Permeability(x, "rotor.return-plate") : x.NotApplicable("there is no return plate")),
+        Define.Figure("back-iron.flux-density.usual", FigureUnit.Tesla, "flux density up to which the steel behind the magnets stays nearly ideal", "table steels at {rotor.back-iron.material}; 1.6 T where the permeability is stated in numbers", Sources.PracticeTable, x => Level(x, "rotor.back-iron", "warn-above", SaturationOnset)),
+        Define.Figure("back-iron.flux-density.limit", FigureUnit.Tesla, "flux density past which the steel behind the magnets costs linkage fast", "table steels at {rotor.back-iron.material}; 1.8 T where the permeability is stated in numbers", Sources.PracticeTable, x => Level(x, "rotor.back-iron", "error-above", SaturationLimit)),
+        Define.Figure("return-plate.flux-density.usual", FigureUnit.Tesla, "flux density up to which the return plate stays nearly ideal", "table steels at {rotor.return-plate.material}; 1.6 T where the permeability is stated in numbers", Sources.PracticeTable, x => Level(x, "rotor.return-plate", "warn-above", SaturationOnset)),
+        Define.Figure("return-plate.flux-density.limit", FigureUnit.Tesla, "flux density past which the return plate costs linkage fast", "table steels at {rotor.return-plate.material}; 1.8 T where the permeability is stated in numbers", Sources.PracticeTable, x => Level(x, "rotor.return-plate", "error-above", SaturationLimit)),
         Define.Figure("flux-density.back-iron", FigureUnit.Tesla, "flux density in the steel behind the magnets, linear solution", "half of the pole's flux over {rotor.back-iron.thickness} × {magnet.length}", new Basis(BasisKind.Derived, "continuity of flux: each disc carries half a pole's flux each way"), x => PlateFlux(x, "rotor.back-iron")) with { MethodUncertainty = 0.1 },
         Define.Figure("flux-density.return-plate", FigureUnit.Tesla, "flux density in the return plate, linear solution", "half of the pole's flux over {rotor.return-plate.thickness} × {magnet.length}", new Basis(BasisKind.Derived, "continuity of flux: the plate carries half a pole's flux each way"), x =>
             MachineParts.FacingOf(x) == Facing.Plate ? PlateFlux(x, "rotor.return-plate") : x.NotApplicable("there is no return plate")) with { MethodUncertainty = 0.1 },
@@ -176,6 +181,24 @@ internal static class FieldFigures
         x.OptionalText(section) == "none" || x.OptionalText($"{section}.material") == "ideal" ? x.NotApplicable("there is no plate of finite permeability here")
         : FieldParts.PermeabilityOf(x, section) is { } permeability ? x.Value(permeability)
         : x.Stop();
+
+    private static Outcome Level(Evaluation x, string section, string column, double mildSteel)
+    {
+        if (x.OptionalText(section) == "none" || x.OptionalText($"{section}.material") == "ideal")
+        {
+            return x.NotApplicable("there is no steel here that saturates");
+        }
+
+        if (x.States($"{section}.material.relative-permeability"))
+        {
+            return x.Value(mildSteel);
+        }
+
+        string material = x.Text($"{section}.material");
+        return x.Incomplete ? x.Stop()
+            : EmbeddedRulebooks.Tables.Find("steels")?.FindRow("material", material)?.Number(column) is { } level ? x.Value(level)
+            : x.NotApplicable($"the table of steels has no flux level for '{material}'");
+    }
 
     private static Outcome SaturationLoss(Evaluation x)
     {

@@ -63,14 +63,14 @@ internal static class FieldParts
             return null;
         }
 
-        if (gapBetween < 0)
+        // Overlapping magnets, and a sector on a straight track, are no machine to solve.
+        if (gapBetween < 0 || (linear && part.Outline.Shape == MagnetShape.Sector))
         {
             return null;
         }
 
-        // A sector lies about an axis.
-        bool straight = linear && part.Outline.Shape != MagnetShape.Sector;
-        return new(new MagnetRow { Outline = part.Outline, PolePairs = straight ? 0 : (int)pairs, PolePitch = straight ? pitch : 0 });
+        var row = new MagnetRow { Outline = part.Outline, PolePairs = linear ? 0 : (int)pairs, PolePitch = linear ? pitch : 0 };
+        return row.DomainFault is null ? new(row) : null;
     }
 
     private static Shape<MagneticLayers>? ReadLayers(Evaluation x)
@@ -86,7 +86,7 @@ internal static class FieldParts
             return null;
         }
 
-        return new(new MagneticLayers
+        var layers = new MagneticLayers
         {
             MagnetThickness = thickness,
             Gap = facing == Facing.Nothing ? 0 : gap,
@@ -99,7 +99,8 @@ internal static class FieldParts
             },
             Behind = behind,
             OppositePlate = opposite,
-        });
+        };
+        return layers.DomainFault is null ? new(layers) : null;
     }
 
     private static SteelPlate ReadPlate(Evaluation x, string section)
